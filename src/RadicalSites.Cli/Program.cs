@@ -1,0 +1,2 @@
+#pragma warning disable
+return 0;

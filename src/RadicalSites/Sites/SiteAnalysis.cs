@@ -1,0 +1,29 @@
+using System.Collections.Generic;
+using RadicalSites.Molecules;
+
+namespace RadicalSites.Sites;
+
+/// <summary>All C(sp3)-H sites of one molecule.</summary>
+/// <remarks>Immutable and safe for use by many threads.</remarks>
+public sealed class SiteAnalysis
+{
+    private readonly int[] siteOfAtom;
+
+    internal SiteAnalysis(Molecule molecule, IReadOnlyList<Site> sites, int[] siteOfAtom)
+    {
+        Molecule = molecule;
+        Sites = sites;
+        this.siteOfAtom = siteOfAtom;
+    }
+
+    /// <summary>The molecule analysed.</summary>
+    public Molecule Molecule { get; }
+
+    /// <summary>The sites in order of their lowest carbon index; empty when there is no C(sp3)-H bond.</summary>
+    public IReadOnlyList<Site> Sites { get; }
+
+    /// <summary>The site that a carbon belongs to.</summary>
+    /// <param name="atom">0-based atom index.</param>
+    /// <returns>The site, or <see langword="null"/> when the atom is no C(sp3)-H carbon.</returns>
+    public Site? SiteOf(int atom) => siteOfAtom[atom] < 0 ? null : Sites[siteOfAtom[atom]];
+}
