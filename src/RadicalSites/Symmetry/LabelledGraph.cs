@@ -1,0 +1,72 @@
+using System;
+
+namespace RadicalSites.Symmetry;
+
+/// <summary>A graph written down by the places of its atoms in an order; equal for two orders that an automorphism relates.</summary>
+internal sealed class LabelledGraph
+{
+    private ulong[] words = [];
+    private int count;
+
+    /// <summary>Writes the graph down.</summary>
+    /// <param name="graph">Connected graph, stereo elements included.</param>
+    /// <param name="order">A discrete partition.</param>
+    internal void Fill(SymmetryGraph graph, ColorPartition order)
+    {
+        int n = graph.AtomCount;
+        int size = (2 * n) + graph.Offset[n] + graph.ElementCount + 1;
+        if (words.Length < size)
+        {
+            words = new ulong[Math.Max(size, 2 * words.Length)];
+        }
+
+        count = 0;
+        words[count++] = (ulong)n;
+        for (int place = 0; place < n; place++)
+        {
+            int atom = order.Members[place];
+            words[count++] = graph.Key[atom];
+            int first = count;
+            for (int i = graph.Offset[atom]; i < graph.Offset[atom + 1]; i++)
+            {
+                int other = order.Position[graph.Adjacent[i]];
+                if (other < place)
+                {
+                    words[count++] = ((ulong)other << 32) | (uint)graph.Weight[i];
+                }
+            }
+
+            if (count - first > 1)
+            {
+                Array.Sort(words, first, count - first);
+            }
+
+            words[count++] = ulong.MaxValue;
+        }
+
+        int elements = count;
+        for (int e = 0; e < graph.ElementCount; e++)
+        {
+            int begin = order.Position[graph.Focus[e]];
+            int end = order.Position[graph.FocusEnd[e]];
+            int sign = graph.ResolvedSign(e, order.CellOf) + 1;
+            words[count++] = ((ulong)Math.Min(begin, end) << 34) | ((ulong)Math.Max(begin, end) << 4) | (uint)sign;
+        }
+
+        Array.Sort(words, elements, count - elements);
+    }
+
+    internal int CompareTo(LabelledGraph other) =>
+        words.AsSpan(0, count).SequenceCompareTo(other.words.AsSpan(0, other.count));
+
+    internal void CopyFrom(LabelledGraph other)
+    {
+        if (words.Length < other.count)
+        {
+            words = new ulong[other.words.Length];
+        }
+
+        count = other.count;
+        Array.Copy(other.words, words, count);
+    }
+}

@@ -1,0 +1,122 @@
+using System;
+using RadicalSites.Diagnostics;
+using RadicalSites.Molecules;
+
+namespace RadicalSites.Symmetry;
+
+public sealed partial class SymmetryAnalysis
+{
+    /// <summary>Refinement steps allowed to all exact searches of one molecule.</summary>
+    internal const int SearchLimit = 200_000;
+
+    /// <summary>Finds the equivalent atoms and hydrogens of a molecule.</summary>
+    /// <param name="molecule">Any molecule; may be empty or have several fragments.</param>
+    /// <returns>The analysis.</returns>
+    public static SymmetryAnalysis Perceive(Molecule molecule)
+    {
+        ArgumentNullException.ThrowIfNull(molecule);
+        int n = molecule.AtomCount;
+        SymmetryWorkspace workspace = SymmetryWorkspace.Own;
+        SymmetryGraph graph = workspace.Graph;
+        graph.Load(molecule, false);
+        graph.FindFragments();
+        workspace.Isomorphism.Begin(SearchLimit);
+        workspace.Constitution.Start(graph);
+        workspace.Constitution.Refine(graph);
+        FindConstitutionalOrbits(workspace);
+        int[] constitutional = Roots(workspace.ConstitutionalOrbits, n);
+        int[] enantiotopic = constitutional;
+        int[] homotopic = constitutional;
+        int stated = StereoFrames.Add(graph, molecule);
+        FrameAlignment.Align(workspace, stated, constitutional);
+        TopicitySearch topicity = new(workspace, molecule);
+        if (graph.ElementCount > 0)
+        {
+            topicity.FindOrbits(constitutional);
+            enantiotopic = Roots(workspace.MirrorOrbits, n);
+            homotopic = Roots(workspace.ProperOrbits, n);
+        }
+
+        Topicity[] hydrogens = new Topicity[n];
+        topicity.FindHydrogens(hydrogens);
+        return new SymmetryAnalysis(
+            molecule, constitutional, enantiotopic, homotopic, hydrogens,
+            workspace.Isomorphism.IsExhausted
+                ? [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], SearchLimit, "refinement steps")]
+                : []);
+    }
+
+    private static void FindConstitutionalOrbits(SymmetryWorkspace workspace)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        ColorPartition partition = workspace.Constitution;
+        OrbitForest orbits = workspace.ConstitutionalOrbits;
+        int n = graph.AtomCount;
+        orbits.Start(n);
+        for (int cell = 0; cell < n; cell += partition.Length[cell])
+        {
+            int end = cell + partition.Length[cell];
+            int first = partition.Members[cell];
+            for (int i = cell + 1; i < end; i++)
+            {
+                int other = partition.Members[i];
+                if (orbits.Find(first) != orbits.Find(other) && !Join(workspace, first, other))
+                {
+                    JoinAny(workspace, cell, i);
+                }
+            }
+        }
+    }
+
+    private static bool Join(SymmetryWorkspace workspace, int first, int second)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        if (workspace.Probe.TryMap(graph, workspace.Constitution, first, second))
+        {
+            for (int i = 0; i < workspace.Probe.AssignedCount; i++)
+            {
+                int atom = workspace.Probe.Assigned[i];
+                workspace.ConstitutionalOrbits.Union(atom, workspace.Probe.Image[atom]);
+            }
+
+            return true;
+        }
+
+        if (!workspace.Isomorphism.TryFind(
+            graph, workspace.Constitution, workspace.Constitution, [first], [second], false))
+        {
+            return false;
+        }
+
+        TopicitySearch.UnionImages(workspace, workspace.ConstitutionalOrbits);
+        return true;
+    }
+
+    /// <summary>The refined cell holds several orbits: compares with the other classes found so far.</summary>
+    private static void JoinAny(SymmetryWorkspace workspace, int cell, int index)
+    {
+        ColorPartition partition = workspace.Constitution;
+        OrbitForest orbits = workspace.ConstitutionalOrbits;
+        int atom = partition.Members[index];
+        for (int i = cell + 1; i < index; i++)
+        {
+            int other = partition.Members[i];
+            if (orbits.Find(other) == orbits.Find(atom)
+                || (orbits.Find(other) != orbits.Find(partition.Members[cell]) && Join(workspace, other, atom)))
+            {
+                return;
+            }
+        }
+    }
+
+    private static int[] Roots(OrbitForest orbits, int n)
+    {
+        int[] roots = new int[n];
+        for (int i = 0; i < n; i++)
+        {
+            roots[i] = orbits.Find(i);
+        }
+
+        return roots;
+    }
+}
