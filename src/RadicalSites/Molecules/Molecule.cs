@@ -76,6 +76,10 @@ public sealed class Molecule
     /// <returns>Number of neighbours, folded hydrogens not counted.</returns>
     public int DegreeOf(int atom) => offsets[atom + 1] - offsets[atom];
 
+    /// <summary>The same graph with other stereo elements.</summary>
+    internal Molecule WithStereo(StereoElement[] elements) =>
+        new(atoms, bonds, offsets, neighbors, elements, inputIndices, coordinates);
+
     internal ReadOnlySpan<Atom> AtomSpan => atoms;
 
     internal ReadOnlySpan<Bond> BondSpan => bonds;

@@ -237,7 +237,8 @@ internal sealed class AutomorphismProbe
     }
 
     private bool CenterHolds(SymmetryGraph graph, int element) =>
-        StereoImage.SignOfCenter(graph, element, Image) == 1;
+        StereoImage.SignOfCenter(graph, element, Image, graph.Configuration) == 1;
 
-    private bool AxisHolds(SymmetryGraph graph, int element) => StereoImage.SignOfAxis(graph, element, Image) == 1;
+    private bool AxisHolds(SymmetryGraph graph, int element) =>
+        StereoImage.SignOfAxis(graph, element, Image, graph.Configuration) == 1;
 }

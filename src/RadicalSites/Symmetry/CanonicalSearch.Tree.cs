@@ -81,7 +81,7 @@ internal sealed partial class CanonicalSearch
             current.CopyFrom(node);
             current.Trace = 0;
             current.Individualise(atom);
-            current.Refine(graph);
+            current.Refine(graph, graph.Configuration);
             if (path.Count > depth)
             {
                 path.RemoveRange(depth, path.Count - depth);
@@ -157,6 +157,7 @@ internal sealed partial class CanonicalSearch
             permutation[bestMembers[i]] = current.Members[i];
         }
 
+        Generators?.Add(permutation.AsSpan(0, graph.AtomCount).ToArray());
         int common = 0;
         while (common < path.Count && common < bestPath.Length && path[common] == bestPath[common])
         {

@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 
 namespace RadicalSites.Symmetry;
 
@@ -15,6 +16,9 @@ internal sealed partial class CanonicalSearch
     private readonly AutomorphismProbe probe = new();
     private readonly OrbitForest forest = new();
     private int remaining;
+
+    /// <summary>Receives generators of the automorphism group, as images by atom, when set.</summary>
+    internal List<int[]>? Generators;
 
     /// <summary>Whether the budget ran out, so that the order may depend on the numbering.</summary>
     internal bool IsExhausted { get; private set; }
@@ -41,7 +45,7 @@ internal sealed partial class CanonicalSearch
         remaining = budget;
         IsExhausted = false;
         current.Start(graph);
-        current.Refine(graph);
+        current.Refine(graph, graph.Configuration);
         forest.Reserve(graph.AtomCount);
         Descend(graph);
     }
@@ -71,7 +75,7 @@ internal sealed partial class CanonicalSearch
             }
 
             current.Individualise(current.Members[cell]);
-            current.Refine(graph);
+            current.Refine(graph, graph.Configuration);
         }
     }
 
@@ -107,6 +111,7 @@ internal sealed partial class CanonicalSearch
                 continue;
             }
 
+            RecordProbe(graph);
             for (int j = 0; j < probe.AssignedCount; j++)
             {
                 int atom = probe.Assigned[j];
@@ -122,5 +127,21 @@ internal sealed partial class CanonicalSearch
         }
 
         return proven;
+    }
+
+    private void RecordProbe(SymmetryGraph graph)
+    {
+        if (Generators is null)
+        {
+            return;
+        }
+
+        int[] image = new int[graph.AtomCount];
+        for (int i = 0; i < image.Length; i++)
+        {
+            image[i] = probe.ImageOf(i);
+        }
+
+        Generators.Add(image);
     }
 }

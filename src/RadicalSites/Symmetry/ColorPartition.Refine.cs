@@ -9,8 +9,8 @@ internal sealed partial class ColorPartition
     /// element that the colours resolve.
     /// </summary>
     /// <param name="graph">The graph the partition was started on.</param>
-    /// <param name="mirror">Whether chiral elements are read as in the mirror image.</param>
-    internal void Refine(SymmetryGraph graph, bool mirror = false)
+    /// <param name="configuration">Configurations to read the stereo elements by.</param>
+    internal void Refine(SymmetryGraph graph, sbyte[] configuration)
     {
         do
         {
@@ -29,7 +29,7 @@ internal sealed partial class ColorPartition
                 SplitBy(graph, cell);
             }
         }
-        while (graph.ElementCount > 0 && CellCount < Count && SplitByStereo(graph, mirror));
+        while (graph.ElementCount > 0 && CellCount < Count && SplitByStereo(graph, configuration));
     }
 
     private void SplitBy(SymmetryGraph graph, int cell)
@@ -276,7 +276,27 @@ internal sealed partial class ColorPartition
         }
     }
 
-    private bool SplitByStereo(SymmetryGraph graph, bool mirror)
+    /// <summary>Splits the foci of the first elements of a graph from atoms without one.</summary>
+    internal void SeparateFoci(SymmetryGraph graph, int elements)
+    {
+        int count = 0;
+        for (int e = 0; e < elements; e++)
+        {
+            int mark = graph.Kind[e] == SymmetryGraph.Axis ? 16 : 1;
+            count = Mark(graph.Focus[e], mark, count);
+            if (graph.FocusEnd[e] != graph.Focus[e])
+            {
+                count = Mark(graph.FocusEnd[e], mark, count);
+            }
+        }
+
+        if (count > 0)
+        {
+            SplitTouched(count);
+        }
+    }
+
+    private bool SplitByStereo(SymmetryGraph graph, sbyte[] configuration)
     {
         int count = 0;
         for (int e = 0; e < graph.ElementCount; e++)
@@ -288,15 +308,10 @@ internal sealed partial class ColorPartition
                 continue;
             }
 
-            int sign = graph.ResolvedSign(e, CellOf);
+            int sign = graph.ResolvedSign(e, CellOf, configuration);
             if (sign == 0)
             {
                 continue;
-            }
-
-            if (mirror && graph.Kind[e] != SymmetryGraph.Axis)
-            {
-                sign = -sign;
             }
 
             int mark = sign < 0 ? 1 : 2;

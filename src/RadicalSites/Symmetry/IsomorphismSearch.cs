@@ -16,7 +16,7 @@ internal sealed class IsomorphismSearch
     private readonly List<ColorPartition> left = [];
     private readonly List<ColorPartition> right = [];
     private int remaining;
-    private bool mirror;
+    private sbyte[] configurationOfImage = [];
 
     /// <summary>Image of each atom of the fragment after success, -1 elsewhere.</summary>
     internal int[] Image = [];
@@ -34,15 +34,18 @@ internal sealed class IsomorphismSearch
     /// <summary>Tries to find the automorphism.</summary>
     /// <param name="graph">Graph with its stereo elements and fragments.</param>
     /// <param name="start">Refined partition of the graph.</param>
-    /// <param name="startOfImage">Refined partition of the graph, read mirrored when <paramref name="mirrored"/>.</param>
+    /// <param name="startOfImage">Partition of the graph refined by <paramref name="configurationOfImage"/>.</param>
     /// <param name="from">Atoms, all of one fragment.</param>
     /// <param name="to">Their images, in the same order, all of one fragment.</param>
-    /// <param name="mirrored">Whether every chiral element must be inverted.</param>
+    /// <param name="configurationOfImage">
+    /// Configurations that the images of the stereo elements must have: those of the graph for a proper operation, the
+    /// mirrored ones for an operation that mirrors.
+    /// </param>
     internal bool TryFind(
         SymmetryGraph graph, ColorPartition start, ColorPartition startOfImage, ReadOnlySpan<int> from,
-        ReadOnlySpan<int> to, bool mirrored)
+        ReadOnlySpan<int> to, sbyte[] configurationOfImage)
     {
-        mirror = mirrored;
+        this.configurationOfImage = configurationOfImage;
         if (Image.Length < graph.AtomCount)
         {
             Image = new int[Math.Max(64, graph.AtomCount)];
@@ -64,6 +67,10 @@ internal sealed class IsomorphismSearch
 
         return Descend(graph, 0, from[0], to[0]);
     }
+
+    /// <summary>Tries to find an automorphism of a graph that has no stereo elements at the moment.</summary>
+    internal bool TryFindPlain(SymmetryGraph graph, ColorPartition start, int from, int to) =>
+        TryFind(graph, start, start, [from], [to], graph.Configuration);
 
     private bool Descend(SymmetryGraph graph, int depth, int source, int target)
     {
@@ -112,11 +119,12 @@ internal sealed class IsomorphismSearch
         }
 
         one.Individualise(atom);
-        one.Refine(graph);
+        one.Refine(graph, graph.Configuration);
         two.Individualise(image);
-        two.Refine(graph, mirror);
+        two.Refine(graph, configurationOfImage);
         return one.CellCount == two.CellCount && one.Trace == two.Trace
-            && StereoSignature(graph, one, atom, false) == StereoSignature(graph, two, image, mirror);
+            && StereoSignature(graph, one, atom, graph.Configuration)
+                == StereoSignature(graph, two, image, configurationOfImage);
     }
 
     private static int TargetCell(SymmetryGraph graph, ColorPartition partition, int source)
@@ -161,13 +169,13 @@ internal sealed class IsomorphismSearch
             }
 
             int center = graph.CenterAt[atom] - 1;
-            if (center >= 0 && StereoImage.SignOfCenter(graph, center, Image) != (mirror ? -1 : 1))
+            if (center >= 0 && StereoImage.SignOfCenter(graph, center, Image, configurationOfImage) != 1)
             {
                 return false;
             }
 
             int axis = graph.AxisAt[atom] - 1;
-            if (axis >= 0 && StereoImage.SignOfAxis(graph, axis, Image) != 1)
+            if (axis >= 0 && StereoImage.SignOfAxis(graph, axis, Image, configurationOfImage) != 1)
             {
                 return false;
             }
@@ -176,7 +184,7 @@ internal sealed class IsomorphismSearch
         return true;
     }
 
-    private static ulong StereoSignature(SymmetryGraph graph, ColorPartition partition, int atom, bool mirrored)
+    private static ulong StereoSignature(SymmetryGraph graph, ColorPartition partition, int atom, sbyte[] configuration)
     {
         ulong sum = 0;
         int fragment = graph.FragmentIndexOf(atom);
@@ -187,12 +195,7 @@ internal sealed class IsomorphismSearch
                 continue;
             }
 
-            int sign = graph.ResolvedSign(e, partition.CellOf);
-            if (mirrored && graph.Kind[e] != SymmetryGraph.Axis)
-            {
-                sign = -sign;
-            }
-
+            int sign = graph.ResolvedSign(e, partition.CellOf, configuration);
             int low = Math.Min(partition.CellOf[graph.Focus[e]], partition.CellOf[graph.FocusEnd[e]]);
             sum += ((ulong)(low + 1) * 0x9E3779B97F4A7C15UL) ^ ((ulong)(sign + 2) * 0xD6E8FEB86659FD93UL);
         }

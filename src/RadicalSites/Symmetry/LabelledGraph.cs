@@ -49,7 +49,7 @@ internal sealed class LabelledGraph
         {
             int begin = order.Position[graph.Focus[e]];
             int end = order.Position[graph.FocusEnd[e]];
-            int sign = graph.ResolvedSign(e, order.CellOf) + 1;
+            int sign = graph.ResolvedSign(e, order.CellOf, graph.Configuration) + 1;
             words[count++] = ((ulong)Math.Min(begin, end) << 34) | ((ulong)Math.Max(begin, end) << 4) | (uint)sign;
         }
 

@@ -7,32 +7,40 @@ namespace RadicalSites.Symmetry;
 /// Adds to a graph every place whose geometry a symmetry operation must respect, whether or not a configuration is
 /// stated there: tetrahedral atoms with four distinct ligand positions, allene axes, double bonds.
 /// </summary>
+/// <remarks>
+/// A double bond in a ring of fewer than eight atoms has no choice and is left out. So is a centre with three or more
+/// like terminal ligands, which take up any exchange. Odd cumulenes longer than a double bond count only when stated.
+/// </remarks>
 internal static class StereoFrames
 {
-    /// <summary>Adds the frames; the stated configurations come first.</summary>
-    /// <returns>Number of frames whose configuration is stated.</returns>
-    internal static int Add(SymmetryGraph graph, Molecule molecule)
+    /// <summary>Smallest ring in which a double bond may be cis or trans.</summary>
+    internal const int SmallestStereoRing = 8;
+
+    /// <summary>Adds the frames that have no element yet.</summary>
+    internal static void AddFree(SymmetryGraph graph, Molecule molecule)
     {
-        graph.AddStatedElements(molecule);
-        int stated = graph.ElementCount;
         ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
         for (int i = 0; i < atoms.Length; i++)
         {
-            if (graph.CenterAt[i] == 0 && IsCenter(graph, atoms, i))
+            int degree = graph.Offset[i + 1] - graph.Offset[i];
+            if (degree is 3 or 4 && graph.CenterAt[i] == 0 && IsCenter(graph, atoms, i))
             {
                 AddCenter(graph, i);
+            }
+            else if (degree == 2 && graph.CenterAt[i] == 0)
+            {
+                AddAllene(graph, atoms, i);
             }
         }
 
         foreach (Bond bond in molecule.BondSpan)
         {
-            if (bond.Order == BondOrder.Double && !bond.IsAromatic && !bond.IsInRing)
+            if (bond.Order == BondOrder.Double && !bond.IsAromatic
+                && (!bond.IsInRing || graph.ShortestRing(bond.Begin, bond.End, SmallestStereoRing) >= SmallestStereoRing))
             {
                 AddDoubleBond(graph, atoms, bond);
             }
         }
-
-        return stated;
     }
 
     /// <summary>Whether an atom holds four ligand positions in a fixed tetrahedral arrangement.</summary>
@@ -59,34 +67,21 @@ internal static class StereoFrames
         {
             6 or 14 or 32 or 50 => ligands == 4 && doubles == 0 && atom.FormalCharge == 0,
             5 => degree == 4 && doubles == 0 && atom.FormalCharge == -1,
-            7 => degree == 4 && doubles == 0 && atom.FormalCharge == 1,
+            7 => doubles == 0 && ((degree == 4 && atom.FormalCharge == 1) || (ligands == 3 && graph.IsHeldByRings(index))),
             15 or 33 => (ligands == 4 && doubles <= 1) || (ligands == 3 && doubles == 0 && atom.FormalCharge == 0),
-            16 or 34 or 52 => (degree == 4 && doubles is 0 or 2 && atom.HydrogenCount == 0)
-                || (degree == 3 && atom.HydrogenCount == 0 && atom.FormalCharge is 0 or 1 && doubles <= 1),
+            16 or 34 or 52 => atom.HydrogenCount == 0
+                && (degree == 4 ? doubles is 0 or 2 : atom.FormalCharge is 0 or 1 && doubles <= 1),
             _ => false,
         };
-    }
-
-    private static void AddCenter(SymmetryGraph graph, int atom)
-    {
-        int at = graph.Offset[atom];
-        int degree = graph.DegreeOf(atom);
-        int[] adjacent = graph.Adjacent;
-        if (LeafTwins(graph, atom) >= 3)
-        {
-            return;
-        }
-
-        graph.Add(
-            SymmetryGraph.Center, atom, atom, adjacent[at], adjacent[at + 1], adjacent[at + 2],
-            degree == 4 ? adjacent[at + 3] : SymmetryGraph.NoAtom, 1);
     }
 
     /// <summary>Largest number of like terminal neighbours; from three on they take up any exchange among the ligands.</summary>
     internal static int LeafTwins(SymmetryGraph graph, int atom)
     {
         int best = 0;
-        for (int i = graph.Offset[atom]; i < graph.Offset[atom + 1]; i++)
+        int from = graph.Offset[atom];
+        int to = graph.Offset[atom + 1];
+        for (int i = from; i < to; i++)
         {
             int leaf = graph.Adjacent[i];
             if (graph.DegreeOf(leaf) != 1)
@@ -95,10 +90,10 @@ internal static class StereoFrames
             }
 
             int count = 0;
-            for (int j = graph.Offset[atom]; j < graph.Offset[atom + 1]; j++)
+            for (int j = from; j < to; j++)
             {
                 int other = graph.Adjacent[j];
-                if (graph.DegreeOf(other) == 1 && graph.Key[other] == graph.Key[leaf] && graph.Weight[i] == graph.Weight[j])
+                if (graph.Key[other] == graph.Key[leaf] && graph.Weight[i] == graph.Weight[j])
                 {
                     count++;
                 }
@@ -108,6 +103,40 @@ internal static class StereoFrames
         }
 
         return best;
+    }
+
+    private static void AddCenter(SymmetryGraph graph, int atom)
+    {
+        if (LeafTwins(graph, atom) >= 3)
+        {
+            return;
+        }
+
+        int at = graph.Offset[atom];
+        int[] adjacent = graph.Adjacent;
+        graph.Add(
+            SymmetryGraph.Center, atom, atom, adjacent[at], adjacent[at + 1], adjacent[at + 2],
+            graph.DegreeOf(atom) == 4 ? adjacent[at + 3] : SymmetryGraph.NoAtom, 1);
+    }
+
+    private static void AddAllene(SymmetryGraph graph, ReadOnlySpan<Atom> atoms, int middle)
+    {
+        int at = graph.Offset[middle];
+        if (graph.Weight[at] != SymmetryGraph.DoubleWeight || graph.Weight[at + 1] != SymmetryGraph.DoubleWeight)
+        {
+            return;
+        }
+
+        int begin = graph.Adjacent[at];
+        int end = graph.Adjacent[at + 1];
+        int first = LigandOf(graph, atoms, begin, middle);
+        int second = LigandOf(graph, atoms, end, middle);
+        if (first >= 0 && second >= 0)
+        {
+            graph.Add(
+                SymmetryGraph.Allene, middle, middle, first, graph.OtherLigand(begin, first), second,
+                graph.OtherLigand(end, second), 1);
+        }
     }
 
     private static void AddDoubleBond(SymmetryGraph graph, ReadOnlySpan<Atom> atoms, in Bond bond)
@@ -134,7 +163,7 @@ internal static class StereoFrames
         int degree = graph.DegreeOf(end);
         bool fits = atom.AtomicNumber switch
         {
-            6 or 14 => degree + atom.HydrogenCount == 3 && atom.HydrogenCount <= 1,
+            6 or 14 or 32 => degree + atom.HydrogenCount == 3 && atom.HydrogenCount <= 1,
             7 => degree is 2 or 3 && atom.HydrogenCount <= 1,
             _ => false,
         };
@@ -157,10 +186,7 @@ internal static class StereoFrames
                 return -1;
             }
 
-            if (ligand < 0)
-            {
-                ligand = neighbor;
-            }
+            ligand = ligand < 0 ? neighbor : ligand;
         }
 
         return ligand;

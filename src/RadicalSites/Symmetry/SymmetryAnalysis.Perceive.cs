@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
 
@@ -18,32 +19,75 @@ public sealed partial class SymmetryAnalysis
         int n = molecule.AtomCount;
         SymmetryWorkspace workspace = SymmetryWorkspace.Own;
         SymmetryGraph graph = workspace.Graph;
-        graph.Load(molecule, false);
-        graph.FindFragments();
         workspace.Isomorphism.Begin(SearchLimit);
-        workspace.Constitution.Start(graph);
-        workspace.Constitution.Refine(graph);
+        StereoPerception.Prepare(workspace, molecule, false);
+        int stated = graph.ElementCount;
+        graph.ElementCount = 0;
         FindConstitutionalOrbits(workspace);
+        graph.ElementCount = stated;
         int[] constitutional = Roots(workspace.ConstitutionalOrbits, n);
         int[] enantiotopic = constitutional;
         int[] homotopic = constitutional;
-        int stated = StereoFrames.Add(graph, molecule);
-        FrameAlignment.Align(workspace, stated, constitutional);
-        TopicitySearch topicity = new(workspace, molecule);
-        if (graph.ElementCount > 0)
+        Topicity[] hydrogens = new Topicity[n];
+        StereoFrames.AddFree(graph, molecule);
+        if (graph.ElementCount == 0)
         {
-            topicity.FindOrbits(constitutional);
-            enantiotopic = Roots(workspace.MirrorOrbits, n);
-            homotopic = Roots(workspace.ProperOrbits, n);
+            new TopicitySearch(workspace, molecule, 0).FindHydrogens(hydrogens);
+        }
+        else
+        {
+            ReadGeometry(workspace, molecule, stated, constitutional, out enantiotopic, out homotopic, hydrogens);
         }
 
-        Topicity[] hydrogens = new Topicity[n];
-        topicity.FindHydrogens(hydrogens);
         return new SymmetryAnalysis(
             molecule, constitutional, enantiotopic, homotopic, hydrogens,
             workspace.Isomorphism.IsExhausted
                 ? [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], SearchLimit, "refinement steps")]
                 : []);
+    }
+
+    /// <summary>Splits the orbits by geometry; what holds in every reading of the open configurations counts.</summary>
+    private static void ReadGeometry(
+        SymmetryWorkspace workspace, Molecule molecule, int stated, int[] constitutional, out int[] enantiotopic,
+        out int[] homotopic, Span<Topicity> hydrogens)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        int n = graph.AtomCount;
+        sbyte[] flexible = FlexibleFrames.Find(graph, constitutional);
+        List<sbyte[]> readings = FrameReadings.Find(workspace, stated, flexible, constitutional);
+        enantiotopic = constitutional;
+        homotopic = constitutional;
+        foreach (sbyte[] reading in readings)
+        {
+            reading.CopyTo(graph.Configuration, 0);
+            TopicitySearch topicity = new(workspace, molecule, stated);
+            topicity.FindOrbits(constitutional);
+            topicity.FindHydrogens(hydrogens);
+            enantiotopic = Meet(enantiotopic, Roots(workspace.MirrorOrbits, n));
+            homotopic = Meet(homotopic, Roots(workspace.ProperOrbits, n));
+        }
+    }
+
+    /// <summary>Classes of atoms that are together in both; the first is the finer of earlier readings.</summary>
+    private static int[] Meet(int[] first, int[] second)
+    {
+        int[] lowest = new int[first.Length];
+        for (int i = 0; i < first.Length; i++)
+        {
+            int root = i;
+            for (int j = Math.Max(first[i], second[i]); j < i; j++)
+            {
+                if (first[j] == first[i] && second[j] == second[i])
+                {
+                    root = j;
+                    break;
+                }
+            }
+
+            lowest[i] = root;
+        }
+
+        return lowest;
     }
 
     private static void FindConstitutionalOrbits(SymmetryWorkspace workspace)
@@ -83,7 +127,7 @@ public sealed partial class SymmetryAnalysis
         }
 
         if (!workspace.Isomorphism.TryFind(
-            graph, workspace.Constitution, workspace.Constitution, [first], [second], false))
+            graph, workspace.Constitution, workspace.Constitution, [first], [second], graph.Configuration))
         {
             return false;
         }

@@ -54,6 +54,19 @@ internal sealed partial class SymmetryGraph
         }
     }
 
+    /// <summary>Whether refinement and search handle the geometry of an element.</summary>
+    internal static bool IsHandled(StereoElement element) =>
+        element.Kind <= StereoKind.CisTrans
+        && element.CarrierSpan.Length == (element.Kind == StereoKind.CisTrans ? 2 : 4);
+
+    /// <summary>Removes all elements.</summary>
+    internal void ClearElements()
+    {
+        ElementCount = 0;
+        Array.Clear(CenterAt, 0, AtomCount);
+        Array.Clear(AxisAt, 0, AtomCount);
+    }
+
     /// <summary>Takes over one stated element; geometries other than tetrahedral, allene and cis-trans are left out.</summary>
     internal void AddStated(StereoElement element)
     {
@@ -113,14 +126,14 @@ internal sealed partial class SymmetryGraph
     /// <summary>
     /// Configuration seen through the colours: +1 or -1 when the colours tell all carriers apart that matter, otherwise 0.
     /// </summary>
-    internal int ResolvedSign(int element, int[] cellOf)
+    internal int ResolvedSign(int element, int[] cellOf, sbyte[] configuration)
     {
         int at = 4 * element;
         int a = Color(Carriers[at], cellOf);
         int b = Color(Carriers[at + 1], cellOf);
         int c = Color(Carriers[at + 2], cellOf);
         int d = Color(Carriers[at + 3], cellOf);
-        int sign = Configuration[element];
+        int sign = configuration[element];
         if (a == b || c == d)
         {
             return 0;
@@ -155,9 +168,23 @@ internal sealed partial class SymmetryGraph
         return sign;
     }
 
+    /// <summary>Configurations of the mirror image: chiral elements inverted, axes as they are.</summary>
+    internal void Mirror(ref sbyte[] mirrored)
+    {
+        if (mirrored.Length < ElementCount)
+        {
+            mirrored = new sbyte[Configuration.Length];
+        }
+
+        for (int e = 0; e < ElementCount; e++)
+        {
+            mirrored[e] = Kind[e] == Axis ? Configuration[e] : (sbyte)-Configuration[e];
+        }
+    }
+
     private static int Color(int carrier, int[] cellOf) => carrier < 0 ? -1 : cellOf[carrier];
 
-    private int OtherLigand(int end, int carrier)
+    internal int OtherLigand(int end, int carrier)
     {
         for (int i = Offset[end]; i < Offset[end + 1]; i++)
         {

@@ -11,7 +11,7 @@ internal sealed partial class SymmetryGraph
     internal const int SingleWeight = 1;
 
     private const int AromaticWeight = 1 << 8;
-    private const int DoubleWeight = 1 << 16;
+    internal const int DoubleWeight = 1 << 16;
     private const int TripleWeight = 1 << 22;
     private const int QuadrupleWeight = 1 << 27;
 

@@ -19,6 +19,7 @@ internal sealed class SymmetryWorkspace
     internal readonly OrbitForest ConstitutionalOrbits = new();
     internal readonly OrbitForest MirrorOrbits = new();
     internal readonly OrbitForest ProperOrbits = new();
+    internal sbyte[] MirroredConfiguration = [];
     internal int[] Places = [];
 
     /// <summary>The workspace of the calling thread; its users do not nest.</summary>

@@ -10,15 +10,18 @@ internal readonly struct TopicitySearch
     private readonly SymmetryGraph graph;
     private readonly Molecule molecule;
 
-    internal TopicitySearch(SymmetryWorkspace workspace, Molecule molecule)
+    internal TopicitySearch(SymmetryWorkspace workspace, Molecule molecule, int stated)
     {
         this.workspace = workspace;
         this.molecule = molecule;
         graph = workspace.Graph;
         workspace.Stereo.CopyFrom(workspace.Constitution);
         workspace.Mirrored.CopyFrom(workspace.Constitution);
-        workspace.Stereo.Refine(graph, false);
-        workspace.Mirrored.Refine(graph, true);
+        workspace.Stereo.SeparateFoci(graph, stated);
+        workspace.Mirrored.SeparateFoci(graph, stated);
+        workspace.Stereo.Refine(graph, graph.Configuration);
+        graph.Mirror(ref workspace.MirroredConfiguration);
+        workspace.Mirrored.Refine(graph, workspace.MirroredConfiguration);
     }
 
     /// <summary>Fills the orbits of proper operations and those of proper and mirroring ones.</summary>
@@ -39,15 +42,16 @@ internal readonly struct TopicitySearch
         }
     }
 
-    /// <summary>Relates the hydrogens on each atom.</summary>
+    /// <summary>Relates the hydrogens on each atom; a weaker relation found before stays.</summary>
     internal void FindHydrogens(Span<Topicity> hydrogens)
     {
         ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
         for (int i = 0; i < atoms.Length; i++)
         {
-            hydrogens[i] = atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 2 ? OfMethylene(i)
+            Topicity found = atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 2 ? OfMethylene(i)
                 : atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 1 ? OfTerminal(i)
                 : Topicity.Homotopic;
+            hydrogens[i] = found > hydrogens[i] ? found : hydrogens[i];
         }
     }
 
@@ -112,7 +116,7 @@ internal readonly struct TopicitySearch
             return true;
         }
 
-        if (!workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Stereo, [from], [to], false))
+        if (!workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Stereo, [from], [to], graph.Configuration))
         {
             return false;
         }
@@ -125,7 +129,7 @@ internal readonly struct TopicitySearch
     private bool TryMirror(int from, int to)
     {
         if (workspace.Stereo.CellOf[from] != workspace.Mirrored.CellOf[to]
-            || !workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Mirrored, [from], [to], true))
+            || !workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Mirrored, [from], [to], workspace.MirroredConfiguration))
         {
             return false;
         }
@@ -142,13 +146,13 @@ internal readonly struct TopicitySearch
         int[] cellOf = workspace.Stereo.CellOf;
         if (cellOf[first] == cellOf[second]
             && workspace.Isomorphism.TryFind(
-                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], false))
+                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], graph.Configuration))
         {
             return Topicity.Homotopic;
         }
 
         return graph.ElementCount == 0 || workspace.Isomorphism.TryFind(
-            graph, workspace.Stereo, workspace.Mirrored, [atom, first, second], [atom, first, second], true)
+            graph, workspace.Stereo, workspace.Mirrored, [atom, first, second], [atom, first, second], workspace.MirroredConfiguration)
             ? Topicity.Enantiotopic
             : Topicity.Diastereotopic;
     }
@@ -183,7 +187,7 @@ internal readonly struct TopicitySearch
 
         return second >= 0 && workspace.Stereo.CellOf[first] == workspace.Stereo.CellOf[second]
             && workspace.Isomorphism.TryFind(
-                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], false)
+                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], graph.Configuration)
             ? Topicity.Homotopic
             : Topicity.Diastereotopic;
     }

@@ -1,0 +1,112 @@
+using System;
+using System.Collections.Generic;
+
+namespace RadicalSites.Symmetry;
+
+/// <summary>
+/// Gives configurations to frames that state none, in every way that lets as many symmetries as possible of the
+/// constitution act as rotations or reflections. Usually there is one way; equivalent centres whose relation is open,
+/// such as the two of 1,3-dimethylcyclobutane, have several.
+/// </summary>
+internal static class FrameReadings
+{
+    private const int MostReadings = 8;
+
+    /// <summary>Finds the readings.</summary>
+    /// <param name="workspace">Workspace whose graph holds the frames; the stated ones come first.</param>
+    /// <param name="stated">Number of frames whose configuration is stated.</param>
+    /// <param name="flexible">Result of <see cref="FlexibleFrames"/>.</param>
+    /// <param name="orbits">Constitutional orbit by atom.</param>
+    /// <returns>One or more full arrays of configurations.</returns>
+    internal static List<sbyte[]> Find(SymmetryWorkspace workspace, int stated, sbyte[] flexible, int[] orbits)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        sbyte[] basis = graph.Configuration.AsSpan(0, graph.ElementCount).ToArray();
+        List<sbyte[]> readings = [basis];
+        bool[] open = new bool[graph.FragmentCount];
+        for (int e = stated; e < flexible.Length; e++)
+        {
+            int focus = graph.Focus[e];
+            ColorPartition cells = workspace.Constitution;
+            if (flexible[e] < 0 && cells.Length[cells.CellOf[focus]] > 1)
+            {
+                open[graph.FragmentIndexOf(focus)] = true;
+            }
+        }
+
+        for (int fragment = 0; fragment < open.Length; fragment++)
+        {
+            int first = graph.Fragment(fragment)[0];
+            if (!open[fragment])
+            {
+                continue;
+            }
+
+            int model = graph.FragmentIndexOf(orbits[first]);
+            if (model != fragment)
+            {
+                CopyFragment(workspace, stated, orbits[first], first, readings);
+                continue;
+            }
+
+            List<sbyte[]> own = new FragmentReadings(workspace, fragment, stated, flexible).Solve(MostReadings);
+            List<sbyte[]> combined = [];
+            int count = Math.Max(readings.Count, own.Count);
+            for (int r = 0; r < count; r++)
+            {
+                sbyte[] reading = [.. readings[r % readings.Count]];
+                sbyte[] part = own[r % own.Count];
+                for (int e = 0; e < reading.Length; e++)
+                {
+                    if (graph.FragmentIndexOf(graph.Focus[e]) == fragment)
+                    {
+                        reading[e] = part[e];
+                    }
+                }
+
+                combined.Add(reading);
+            }
+
+            readings = combined;
+        }
+
+        return readings;
+    }
+
+    /// <summary>Reads a fragment like the first one that is equal to it.</summary>
+    private static void CopyFragment(SymmetryWorkspace workspace, int stated, int from, int to, List<sbyte[]> readings)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        int count = graph.ElementCount;
+        graph.ElementCount = 0;
+        bool found = workspace.Isomorphism.TryFindPlain(graph, workspace.Constitution, from, to);
+        graph.ElementCount = count;
+        if (!found)
+        {
+            return;
+        }
+
+        int[] image = workspace.Isomorphism.Image;
+        sbyte[] saved = graph.Configuration;
+        foreach (sbyte[] reading in readings)
+        {
+            graph.Configuration = reading;
+            for (int e = stated; e < count; e++)
+            {
+                if (graph.FragmentIndexOf(graph.Focus[e]) != graph.FragmentIndexOf(from))
+                {
+                    continue;
+                }
+
+                int there = StereoImage.TargetOf(graph, e, image);
+                if (there >= stated)
+                {
+                    int sign = StereoImage.SignOf(graph, e, image, reading);
+                    reading[there] = (sbyte)(sign == 0 ? reading[there] : reading[there] * sign);
+                }
+            }
+        }
+
+        graph.Configuration = saved;
+    }
+}
