@@ -31,6 +31,8 @@ public static partial class ProblemCatalogue
             .. new[]
             {
                 General.Entries,
+                Interference.Entries,
+                Heat.Entries,
             }.SelectMany(static list => list).OrderBy(static entry => entry.Code, StringComparer.Ordinal),
         ];
 

@@ -1,0 +1,97 @@
+using System;
+using System.Collections.Frozen;
+using System.Collections.Generic;
+using System.Globalization;
+using System.IO;
+
+namespace RadicalSites.Molecules;
+
+/// <summary>Standard atomic weights of the elements and masses of common nuclides.</summary>
+/// <remarks>
+/// Source: [IUPAC2021] abridged standard atomic weights; [AME2020] for nuclides. Immutable and safe for use by many
+/// threads.
+/// </remarks>
+public static class AtomicWeights
+{
+    /// <summary>Mass of one mole of an element or nuclide [g/mol].</summary>
+    /// <param name="atomicNumber">Atomic number 1 to 118.</param>
+    /// <param name="massNumber">Mass number of a stated nuclide, or 0 for the natural mixture.</param>
+    /// <returns>
+    /// The mass, or <see langword="null"/> for the wildcard and for elements without a standard atomic weight. A nuclide
+    /// that is not in the table gets its mass number, which is right to 0.1 g/mol.
+    /// </returns>
+    public static double? Find(int atomicNumber, int massNumber = 0)
+    {
+        if (atomicNumber is < 1 or > Elements.Last)
+        {
+            return null;
+        }
+
+        if (massNumber > 0)
+        {
+            return Table.Nuclides.TryGetValue((atomicNumber, massNumber), out double mass) ? mass : massNumber;
+        }
+
+        double weight = Table.Weights[atomicNumber];
+        return double.IsNaN(weight) ? null : weight;
+    }
+
+    private static class Table
+    {
+        internal static readonly double[] Weights = ReadWeights();
+        internal static readonly FrozenDictionary<(int Element, int MassNumber), double> Nuclides = ReadNuclides();
+
+        private static double[] ReadWeights()
+        {
+            var weights = new double[Elements.Last + 1];
+            Array.Fill(weights, double.NaN);
+            foreach (string[] row in Rows("elements.csv"))
+            {
+                if (row[2].Length > 0)
+                {
+                    weights[Integer(row[0])] = Number(row[2]);
+                }
+            }
+
+            return weights;
+        }
+
+        private static FrozenDictionary<(int Element, int MassNumber), double> ReadNuclides()
+        {
+            var masses = new Dictionary<(int Element, int MassNumber), double>();
+            foreach (string[] row in Rows("isotopes.csv"))
+            {
+                masses.Add((Integer(row[0]), Integer(row[1])), Number(row[2]));
+            }
+
+            return masses.ToFrozenDictionary();
+        }
+
+        private static IEnumerable<string[]> Rows(string name)
+        {
+            using Stream stream = typeof(AtomicWeights).Assembly.GetManifestResourceStream("RadicalSites.Data." + name)
+                ?? throw new InvalidDataException($"The embedded table {name} is missing; the assembly is damaged.");
+            using var reader = new StreamReader(stream);
+            bool header = true;
+            while (reader.ReadLine() is { } line)
+            {
+                if (line.Length == 0 || line[0] == '#')
+                {
+                    continue;
+                }
+
+                if (!header)
+                {
+                    yield return line.Split(',');
+                }
+
+                header = false;
+            }
+        }
+
+        private static int Integer(string text) => int.Parse(text, NumberStyles.None, CultureInfo.InvariantCulture);
+
+        private static double Number(string text) =>
+            double.Parse(text, NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture);
+    }
+}
