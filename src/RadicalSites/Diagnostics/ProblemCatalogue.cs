@@ -31,6 +31,8 @@ public static partial class ProblemCatalogue
             .. new[]
             {
                 General.Entries,
+                Smiles.Entries,
+                Chemistry.Entries,
                 Interference.Entries,
                 Heat.Entries,
             }.SelectMany(static list => list).OrderBy(static entry => entry.Code, StringComparer.Ordinal),

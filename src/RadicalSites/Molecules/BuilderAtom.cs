@@ -12,6 +12,9 @@ internal struct BuilderAtom
     /// <summary>Stated hydrogen count; -1 = by the normal valence.</summary>
     internal sbyte Hydrogens;
 
+    /// <summary>Hydrogen atoms folded into this atom while its own count is still to be implied.</summary>
+    internal byte FoldedHydrogens;
+
     /// <summary>Stated unpaired electrons (molfile RAD); 0 = as the open valence implies.</summary>
     internal byte Unpaired;
 

@@ -1,0 +1,46 @@
+using System;
+using System.Diagnostics.CodeAnalysis;
+using RadicalSites.Diagnostics;
+using RadicalSites.Molecules;
+using RadicalSites.Perception;
+
+namespace RadicalSites.Formats.Smiles;
+
+/// <summary>Reads SMILES after the OpenSMILES specification into molecules.</summary>
+/// <remarks>
+/// One pass over the text, linear in its length, without recursion. Positions in problems are 0-based UTF-16 offsets.
+/// Stateless to the outside and safe for use by many threads. Source: [OPENSMILES].
+/// </remarks>
+public static class SmilesReader
+{
+    [ThreadStatic]
+    private static SmilesParse? parseOfThread;
+
+    /// <summary>Reads a molecule.</summary>
+    /// <param name="text">SMILES without white space.</param>
+    /// <returns>The molecule; atoms in the order of the text.</returns>
+    /// <exception cref="SmilesFormatException">The text is no SMILES, or describes an impossible molecule.</exception>
+    public static Molecule Parse(ReadOnlySpan<char> text) =>
+        TryParse(text, out Molecule? molecule, out FormatProblem? problem) ? molecule : throw new SmilesFormatException(problem);
+
+    /// <summary>Reads a molecule without throwing.</summary>
+    /// <param name="text">SMILES without white space.</param>
+    /// <param name="molecule">The molecule on success.</param>
+    /// <param name="problem">What is wrong otherwise.</param>
+    /// <returns>Whether the text is a molecule.</returns>
+    public static bool TryParse(
+        ReadOnlySpan<char> text, [NotNullWhen(true)] out Molecule? molecule,
+        [NotNullWhen(false)] out FormatProblem? problem)
+    {
+        SmilesParse parse = parseOfThread ??= new SmilesParse();
+        molecule = parse.Read(text, out problem);
+        if (molecule is not null)
+        {
+            problem = null;
+            return true;
+        }
+
+        problem = problem! with { Input = text.ToString() };
+        return false;
+    }
+}
