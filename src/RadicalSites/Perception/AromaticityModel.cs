@@ -36,7 +36,7 @@ internal static partial class AromaticityModel
             candidates += electrons[i] >= 0 ? 1 : 0;
         }
 
-        if (candidates < 3)
+        if (candidates < 3 || (candidates -= Prune(draft, scratch, electrons)) < 3)
         {
             return;
         }
@@ -89,6 +89,57 @@ internal static partial class AromaticityModel
         {
             JoinRings(scratch, electrons, stamps, stamp, open, count);
         }
+    }
+
+    // Takes out candidates that lie on no ring of candidates, and with them the atoms whose double bond led there: such
+    // a double bond leaves the conjugated ring (ortho-quinoid rings). Returns how many were taken out.
+    private static int Prune(StructureDraft draft, CompletionScratch scratch, Span<int> electrons)
+    {
+        Span<int> degree = scratch.Second.AsSpan(0, electrons.Length);
+        Span<int> queue = scratch.Third.AsSpan(0, electrons.Length);
+        int queued = 0;
+        for (int atom = 0; atom < electrons.Length; atom++)
+        {
+            if (electrons[atom] < 0)
+            {
+                continue;
+            }
+
+            degree[atom] = 0;
+            foreach (Neighbor neighbor in scratch.NeighborsOf(atom))
+            {
+                degree[atom] += IsPath(scratch, electrons, neighbor) ? 1 : 0;
+            }
+        }
+
+        for (int atom = 0; atom < electrons.Length; atom++)
+        {
+            if (electrons[atom] >= 0 && degree[atom] < 2)
+            {
+                electrons[atom] = None;
+                queue[queued++] = atom;
+            }
+        }
+
+        for (int head = 0; head < queued; head++)
+        {
+            foreach (Neighbor neighbor in scratch.NeighborsOf(queue[head]))
+            {
+                int other = neighbor.Atom;
+                if (electrons[other] < 0 || (scratch.BondFlags[neighbor.Bond] & CompletionScratch.RingBit) == 0)
+                {
+                    continue;
+                }
+
+                if (--degree[other] < 2 || draft.Bonds[neighbor.Bond].Order == BondOrder.Double)
+                {
+                    electrons[other] = None;
+                    queue[queued++] = other;
+                }
+            }
+        }
+
+        return queued;
     }
 
     private static bool IsPath(CompletionScratch scratch, ReadOnlySpan<int> electrons, Neighbor neighbor) =>
@@ -190,7 +241,7 @@ internal static partial class AromaticityModel
 
         if (ringDoubles == 1)
         {
-            return atom.Element is 5 or 6 or 7 or 8 or 15 or 16 or 33 or 34 or 52 or 0 or 14 && partners <= 3 ? 1 : None;
+            return atom.Element is 5 or 6 or 7 or 8 or 15 or 16 or 33 or 34 or 52 or 0 && partners <= 3 ? 1 : None;
         }
 
         if (outerDoubles == 1)

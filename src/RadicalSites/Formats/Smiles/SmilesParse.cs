@@ -260,8 +260,12 @@ internal sealed partial class SmilesParse
                 bond.Order = BondOrder.Quadruple;
                 break;
             case ':':
-                bond.Order = bothAromatic ? BondOrder.Unknown : BondOrder.Single;
+                // An aromatic bond makes its ends aromatic, so that C1:C:C:C:C:C1 is benzene.
+                bond.Order = BondOrder.Unknown;
                 bond.IsAromatic = true;
+                draft.Atoms[begin].IsAromatic = true;
+                draft.Atoms[end].IsAromatic = true;
+                draft.HasAromatic = true;
                 break;
             case '/' or '\\':
                 bond.Order = BondOrder.Single;
