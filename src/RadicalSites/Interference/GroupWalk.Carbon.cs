@@ -29,11 +29,6 @@ internal sealed partial class GroupWalk
             if (order == BondOrder.Single)
             {
                 singleOxygens += element == 8 ? 1 : 0;
-                if (IsMetal(element) && !molecule.AtomSpan[other].IsAromatic)
-                {
-                    Add(Entry.Organometallic, atom, other);
-                }
-
                 continue;
             }
 

@@ -140,6 +140,11 @@ internal sealed partial class GroupWalk
             Add(Entry.Hydride, atom);
         }
 
+        if (IsMetal(data.AtomicNumber) && CarbonNeighbors(atom) > 0)
+        {
+            Add(Entry.Organometallic, atom, HeavyNeighbor(atom));
+        }
+
         // Alkali and alkaline-earth cations are spectators; carbon-metal bonds are reported from their carbon.
         bool spectator = data.AtomicNumber is 3 or 4 or 11 or 12 or 19 or 20 or 37 or 38 or 55 or 56 or 13 or 30;
         if (IsMetal(data.AtomicNumber) && !spectator && data.AtomicNumber is not (50 or 82))
