@@ -37,7 +37,9 @@ internal static class ValenceModel
             {
                 bonds += atom.FoldedHydrogens;
                 int implied = 0;
-                foreach (byte valence in valences)
+
+                // The organic subset knows a single valence of the halogens: I without brackets in ClICl has no hydrogen.
+                foreach (byte valence in atom.Element is 17 or 35 or 53 ? valences[..1] : valences)
                 {
                     if (valence >= bonds)
                     {
