@@ -9,8 +9,7 @@ namespace RadicalSites.Symmetry;
 /// <remarks>
 /// Two atoms that no symmetry of the labelled graph relates always stand in the same order; atoms that one relates may
 /// exchange, which changes nothing that is written in this order. Element, isotope, charge, hydrogen count, unpaired
-/// electrons, bonds (aromatic ones without regard to the Kekule form), stereo elements as stated and atom classes take
-/// part. Fragments are ordered one by one, then among each other. Immutable and safe for use by many threads.
+/// electrons, bonds (aromatic ones without regard to the Kekule form), real stereo elements and atom classes take part. Fragments are ordered one by one, then among each other. Immutable and safe for use by many threads.
 /// </remarks>
 public sealed class CanonicalRanking
 {
@@ -55,14 +54,7 @@ public sealed class CanonicalRanking
     {
         SymmetryWorkspace workspace = SymmetryWorkspace.Own;
         SymmetryGraph graph = workspace.Graph;
-        graph.Load(molecule, options.IncludeAtomClasses);
-        if (options.IncludeStereo)
-        {
-            graph.AddStatedElements(molecule);
-            graph.MarkElements();
-        }
-
-        graph.FindFragments();
+        Load(workspace, molecule, options);
         if (graph.FragmentCount > 1)
         {
             return FillFragments(workspace, options, ranks);
@@ -75,6 +67,53 @@ public sealed class CanonicalRanking
         }
 
         return !workspace.Canonical.IsExhausted;
+    }
+
+    /// <summary>The molecule written down in canonical order, or its mirror image.</summary>
+    internal static LabelledGraph FormOf(Molecule molecule, bool mirrored)
+    {
+        SymmetryWorkspace workspace = SymmetryWorkspace.Own;
+        SymmetryGraph graph = workspace.Graph;
+        Load(workspace, molecule, CanonicalRankingOptions.Default);
+        if (mirrored)
+        {
+            graph.Mirror(ref workspace.MirroredConfiguration);
+            Array.Copy(workspace.MirroredConfiguration, graph.Configuration, graph.ElementCount);
+        }
+
+        LabelledGraph[] forms = new LabelledGraph[graph.FragmentCount];
+        int[] places = workspace.PlacesFor(graph.AtomCount);
+        for (int f = 0; f < forms.Length; f++)
+        {
+            workspace.FragmentGraph.LoadFragment(graph, f, places);
+            workspace.Canonical.Run(workspace.FragmentGraph, CanonicalRankingOptions.Default.SearchLimit);
+            forms[f] = workspace.Canonical.LabelledForm(workspace.FragmentGraph);
+        }
+
+        Array.Sort(forms, static (a, b) => a.CompareTo(b));
+        LabelledGraph whole = new();
+        foreach (LabelledGraph form in forms)
+        {
+            whole.Append(form);
+        }
+
+        return whole;
+    }
+
+    private static void Load(SymmetryWorkspace workspace, Molecule molecule, CanonicalRankingOptions options)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        if (options.IncludeStereo && molecule.StereoSpan.Length > 0)
+        {
+            workspace.Isomorphism.Begin(options.SearchLimit);
+            StereoPerception.Prepare(workspace, molecule, options.IncludeAtomClasses);
+            graph.MarkElements();
+        }
+        else
+        {
+            graph.Load(molecule, options.IncludeAtomClasses);
+            graph.FindFragments();
+        }
     }
 
     private static bool FillFragments(SymmetryWorkspace workspace, CanonicalRankingOptions options, Span<int> ranks)

@@ -3,13 +3,16 @@ using System.Collections.Generic;
 
 namespace RadicalSites.Symmetry;
 
-/// <summary>Solves for the open configurations of one fragment, one generator of its symmetry after the other.</summary>
+/// <summary>Solves for the open configurations of one fragment, one automorphism after the other.</summary>
 /// <remarks>
-/// Each generator either keeps or inverts all chiral frames. Either way it ties the configurations of the frames that it
+/// Each automorphism either keeps or inverts all chiral frames. Either way it ties the configurations of the frames that it
 /// moves; a union-find with parity holds the ties, and a contradiction discards the way. Not thread-safe.
 /// </remarks>
 internal sealed class FragmentReadings
 {
+    private const int LargestGroup = 192;
+    private const int MostSteps = 20_000;
+
     private readonly SymmetryGraph graph;
     private readonly SymmetryWorkspace workspace;
     private readonly int stated;
@@ -20,6 +23,7 @@ internal sealed class FragmentReadings
     private readonly List<sbyte[]> found = [];
     private int mostAccepted = -1;
     private int mostReadings;
+    private int steps;
 
     internal FragmentReadings(SymmetryWorkspace workspace, int fragment, int stated, sbyte[] flexible)
     {
@@ -84,7 +88,9 @@ internal sealed class FragmentReadings
 
     private void Try(int index, int accepted, SignedForest forest)
     {
-        if (found.Count > 0 && (accepted + generators.Count - index < mostAccepted || found.Count >= mostReadings))
+        int possible = accepted + generators.Count - index;
+        if (found.Count > 0 && (possible < mostAccepted || ++steps > MostSteps
+            || (possible == mostAccepted && found.Count >= mostReadings)))
         {
             return;
         }
@@ -121,7 +127,7 @@ internal sealed class FragmentReadings
             Try(index + 1, accepted + 1, mirror);
         }
 
-        if (!keeps && !inverts)
+        if ((!keeps && !inverts) || possible - 1 > mostAccepted)
         {
             Try(index + 1, accepted, forest);
         }
@@ -159,13 +165,9 @@ internal sealed class FragmentReadings
         workspace.Canonical.Run(own, SymmetryAnalysis.SearchLimit);
         workspace.Canonical.Generators = null;
         ReadOnlySpan<int> atoms = graph.Fragment(fragment);
-        foreach (int[] image in local)
+        local.RemoveAll(image => !MovesRigid(image, places));
+        foreach (int[] image in PermutationGroup.Elements(local, LargestGroup))
         {
-            if (!MovesRigid(image, places))
-            {
-                continue;
-            }
-
             int[] whole = new int[graph.AtomCount];
             Array.Fill(whole, -1);
             for (int i = 0; i < atoms.Length; i++)

@@ -3,7 +3,7 @@ using System;
 namespace RadicalSites.Symmetry;
 
 /// <summary>A graph written down by the places of its atoms in an order; equal for two orders that an automorphism relates.</summary>
-internal sealed class LabelledGraph
+internal sealed class LabelledGraph : IEquatable<LabelledGraph>
 {
     private ulong[] words = [];
     private int count;
@@ -58,6 +58,36 @@ internal sealed class LabelledGraph
 
     internal int CompareTo(LabelledGraph other) =>
         words.AsSpan(0, count).SequenceCompareTo(other.words.AsSpan(0, other.count));
+
+    /// <inheritdoc/>
+    public bool Equals(LabelledGraph? other) => other is not null && CompareTo(other) == 0;
+
+    /// <inheritdoc/>
+    public override bool Equals(object? obj) => Equals(obj as LabelledGraph);
+
+    /// <inheritdoc/>
+    public override int GetHashCode()
+    {
+        ulong hash = 17;
+        for (int i = 0; i < count; i++)
+        {
+            hash = ((hash ^ words[i]) * 0x9E3779B97F4A7C15UL) ^ (hash >> 29);
+        }
+
+        return (int)(hash >> 32);
+    }
+
+    /// <summary>Appends another form, as the next fragment.</summary>
+    internal void Append(LabelledGraph other)
+    {
+        if (words.Length < count + other.count)
+        {
+            Array.Resize(ref words, Math.Max(count + other.count, 2 * words.Length));
+        }
+
+        Array.Copy(other.words, 0, words, count, other.count);
+        count += other.count;
+    }
 
     internal void CopyFrom(LabelledGraph other)
     {

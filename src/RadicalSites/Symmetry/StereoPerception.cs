@@ -8,7 +8,8 @@ namespace RadicalSites.Symmetry;
 /// <remarks>
 /// A stated configuration is real when turning it over gives another molecule. It is a phantom on an atom whose ligands
 /// are alike (<c>C[C@H](C)O</c>), on a nitrogen that inverts freely, on a double bond in a ring of fewer than eight atoms
-/// or with two like ligands at one end, and on a ring atom whose only partner states nothing.
+/// or with two like ligands at one end, on a ring atom whose only partner states nothing, and on the
+/// bridgeheads of a small cage that could only be turned over together, to no effect (norbornane).
 /// Square planar and higher geometries are kept as stated. Atropisomerism and helicity are not perceived.
 /// Safe for use by many threads.
 /// </remarks>
@@ -124,68 +125,5 @@ public static partial class StereoPerception
         }
 
         return count;
-    }
-
-    /// <summary>Finds the stated elements that turn over without changing the molecule.</summary>
-    private static void FindSymmetryPhantoms(
-        SymmetryWorkspace workspace, ReadOnlySpan<StereoElement> stated, ref bool[]? phantom)
-    {
-        SymmetryGraph graph = workspace.Graph;
-        bool refined = false;
-        int e = -1;
-        for (int i = 0; i < stated.Length; i++)
-        {
-            if ((phantom is not null && phantom[i]) || !SymmetryGraph.IsHandled(stated[i]))
-            {
-                continue;
-            }
-
-            e++;
-            if (graph.ResolvedSign(e, workspace.Constitution.CellOf, graph.Configuration) != 0)
-            {
-                continue;
-            }
-
-            if (!refined)
-            {
-                refined = true;
-                RefineStated(workspace, workspace.Stereo, graph.Configuration);
-            }
-
-            if (graph.ResolvedSign(e, workspace.Stereo.CellOf, graph.Configuration) == 0 && TurnsOver(workspace, e))
-            {
-                (phantom ??= new bool[stated.Length])[i] = true;
-            }
-        }
-    }
-
-    private static void RefineStated(SymmetryWorkspace workspace, ColorPartition partition, sbyte[] configuration)
-    {
-        partition.CopyFrom(workspace.Constitution);
-        partition.SeparateFoci(workspace.Graph, workspace.Graph.ElementCount);
-        partition.Refine(workspace.Graph, configuration);
-    }
-
-    private static bool TurnsOver(SymmetryWorkspace workspace, int element)
-    {
-        SymmetryGraph graph = workspace.Graph;
-        sbyte[] turned = (sbyte[])graph.Configuration.Clone();
-        turned[element] = (sbyte)-turned[element];
-        RefineStated(workspace, workspace.Mirrored, turned);
-        int focus = graph.Focus[element];
-        ColorPartition stereo = workspace.Stereo;
-        int cell = stereo.CellOf[focus];
-        ColorPartition other = workspace.Mirrored;
-        int start = other.CellOf[other.Members[cell]];
-        for (int i = start; i < start + other.Length[start]; i++)
-        {
-            int there = other.Members[i];
-            if (workspace.Isomorphism.TryFind(graph, stereo, other, [focus], [there], turned))
-            {
-                return true;
-            }
-        }
-
-        return false;
     }
 }
