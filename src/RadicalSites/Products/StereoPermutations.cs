@@ -68,7 +68,7 @@ internal sealed class StereoPermutations
         return even;
     }
 
-    private bool SameSide(StereoElement element, StereoElement there, int[] image)
+    private static bool SameSide(StereoElement element, StereoElement there, int[] image)
     {
         ReadOnlySpan<int> from = element.CarrierSpan;
         ReadOnlySpan<int> to = there.CarrierSpan;

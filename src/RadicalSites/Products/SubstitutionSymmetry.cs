@@ -89,6 +89,21 @@ internal sealed class SubstitutionSymmetry
         return new SubstitutionSymmetry(carbons, capacity, [.. factors]);
     }
 
+    /// <summary>Number of symmetry operations that differ in what they do to the carbons.</summary>
+    internal BigInteger Order
+    {
+        get
+        {
+            BigInteger order = BigInteger.One;
+            foreach (SubstitutionFactor factor in factors)
+            {
+                order *= factor.Order;
+            }
+
+            return order;
+        }
+    }
+
     /// <summary>Exact number of distinct patterns with 0, 1, 2, ... halogens.</summary>
     internal BigInteger[] Count(int degree)
     {
