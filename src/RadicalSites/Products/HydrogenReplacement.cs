@@ -50,6 +50,25 @@ internal static class HydrogenReplacement
         return new Molecule(atoms, bonds, offsets, neighbors, Keep(stereo, carbons));
     }
 
+    /// <summary>Replaces a hydrogen that is an atom of the graph (isotope 1 or atom class) by a halogen in its place.</summary>
+    internal static Molecule ReplaceGraphHydrogen(
+        Molecule molecule, int carbon, int halogen, ReadOnlySpan<StereoElement> stereo)
+    {
+        Atom[] atoms = molecule.AtomSpan.ToArray();
+        foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
+        {
+            if (atoms[neighbor.Atom].AtomicNumber == 1 && atoms[neighbor.Atom].MassNumber <= 1)
+            {
+                atoms[neighbor.Atom] = new Atom(halogen, 0, 0, 0, 0, AtomFlags.None, 0);
+                return new Molecule(
+                    atoms, molecule.BondSpan.ToArray(), molecule.NeighborOffsets.ToArray(),
+                    molecule.NeighborSpan.ToArray(), Keep(stereo, [carbon]));
+            }
+        }
+
+        throw new ArgumentException("The carbon carries no hydrogen to replace.", nameof(carbon));
+    }
+
     // The common case in three block copies.
     private static void ExtendByOne(Molecule molecule, int carbon, int[] offsets, Neighbor[] neighbors)
     {

@@ -1,0 +1,97 @@
+using System;
+using System.Collections.Generic;
+using RadicalSites.Diagnostics;
+using RadicalSites.Molecules;
+using RadicalSites.Sites;
+
+namespace RadicalSites.Products;
+
+public static partial class ProductEnumerator
+{
+    private sealed partial class Work
+    {
+        // Direct product and those at the other ends of the radical; equal products need no split.
+        private void AddDelocalised(Site site, Molecule direct, string directSmiles)
+        {
+            var paths = new List<int[]>();
+            DelocalisationBarriers barriers = DelocalisationWalk.Find(analysis.Molecule, site.Carbons[0], paths);
+            Report(site, barriers);
+            var ends = new List<(string Smiles, Molecule Molecule, int Atom, ProductRoute Route)>
+            {
+                (directSmiles, direct, site.Carbons[0], ProductRoute.Direct),
+            };
+            foreach (int[] path in paths)
+            {
+                Molecule product = substrate.Transpose(path, halogen, out string smiles);
+                if (!ends.Exists(end => end.Smiles == smiles))
+                {
+                    ends.Add((smiles, product, path[^1], ProductRoute.Transposed));
+                }
+            }
+
+            EndSplit? split = ends.Count == 1 ? null : EndSplit.Find(analysis.Molecule, site, ends[^1].Atom, ends.Count, halogen);
+            for (int i = 0; i < ends.Count; i++)
+            {
+                (string smiles, Molecule molecule, int _, ProductRoute route) = ends[i];
+                ProductDraft draft = Find(smiles, molecule);
+                Classify(draft, site, route == ProductRoute.Direct
+                    ? substrate.Outcome(site, halogen, molecule)
+                    : substrate.TransposedOutcome(molecule));
+                draft.Route = route == ProductRoute.Direct ? route : draft.Route;
+                if (ends.Count == 1)
+                {
+                    draft.Add(site.Number, site.HydrogenCount, 1, 1, 1);
+                }
+                else if (split is null)
+                {
+                    draft.Add(site.Number, site.HydrogenCount, double.NaN, 0, 1);
+                }
+                else
+                {
+                    double part = i == 0 ? split.DirectPart : 1 - split.DirectPart;
+                    draft.Add(
+                        site.Number, site.HydrogenCount, part, Math.Max(0, part - split.HalfWidth),
+                        Math.Min(1, part + split.HalfWidth));
+                }
+            }
+
+            if (ends.Count > 1)
+            {
+                ReportSplit(site, ends.Count, split);
+            }
+        }
+
+        private void Report(Site site, DelocalisationBarriers barriers)
+        {
+            if ((barriers & DelocalisationBarriers.AromaticRing) != 0)
+            {
+                diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.RingPositionExcluded, site.Carbons, site.Number));
+            }
+
+            if ((barriers & DelocalisationBarriers.Heteroatom) != 0)
+            {
+                diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.HeteroatomEndExcluded, site.Carbons, site.Number));
+            }
+
+            if ((barriers & DelocalisationBarriers.SmallRing) != 0)
+            {
+                diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.StrainedEndExcluded, site.Carbons, site.Number));
+            }
+        }
+
+        private void ReportSplit(Site site, int ends, EndSplit? split)
+        {
+            if (split is not null)
+            {
+                diagnostics.Add(Diagnostic.Create(
+                    ProblemCatalogue.Products.EndSplitFromAnalogue, site.Carbons, site.Number, ends, split.Analogue,
+                    split.Source));
+            }
+            else if (shares?.ShareOf(site.Number) is { } share)
+            {
+                diagnostics.Add(Diagnostic.Create(
+                    ProblemCatalogue.Products.EndSplitUnknown, site.Carbons, site.Number, ends, share));
+            }
+        }
+    }
+}

@@ -1,0 +1,15 @@
+namespace RadicalSites.Products;
+
+/// <summary>What to list as products of mono-halogenation.</summary>
+/// <remarks>Immutable and safe for use by many threads.</remarks>
+public sealed record ProductOptions
+{
+    /// <summary>Options used when none are given.</summary>
+    public static ProductOptions Default { get; } = new();
+
+    /// <summary>How stereo is written; <see cref="ProductStereoMode.Mark"/> by default.</summary>
+    public ProductStereoMode Stereo { get; init; } = ProductStereoMode.Mark;
+
+    /// <summary>Whether products at the other ends of delocalised radicals are listed; on by default.</summary>
+    public bool IncludeTransposed { get; init; } = true;
+}

@@ -1,0 +1,175 @@
+using System;
+using System.Collections.Generic;
+using RadicalSites.Canonical;
+using RadicalSites.Diagnostics;
+using RadicalSites.Molecules;
+using RadicalSites.Sites;
+using RadicalSites.Symmetry;
+
+namespace RadicalSites.Products;
+
+/// <summary>A substrate ready to be substituted: its meaningful stereo elements and what its products have in common.</summary>
+internal sealed class ProductSubstrate
+{
+    private readonly SiteAnalysis analysis;
+    private readonly Molecule molecule;
+    private readonly StereoElement[] stereo;
+    private int[]? plainMap;
+
+    private ProductSubstrate(SiteAnalysis analysis, StereoElement[] stereo)
+    {
+        this.analysis = analysis;
+        molecule = analysis.Molecule;
+        this.stereo = stereo;
+    }
+
+    internal static ProductSubstrate Prepare(SiteAnalysis analysis, ProductOptions options) =>
+        new(analysis, options.Stereo == ProductStereoMode.None ? [] : StereoUnits.Meaningful(analysis.Molecule));
+
+    /// <summary>The product of substitution at a site, in the one of two mirror images whose SMILES sorts first.</summary>
+    internal Molecule ReplaceAt(Site site, int halogen, out string smiles)
+    {
+        Molecule product = ReplaceAt(site.Carbons[0], halogen);
+        smiles = CanonicalSmiles.Write(product);
+        if (stereo.Length == 0 || analysis.Symmetry is not { } symmetry)
+        {
+            return product;
+        }
+
+        // Enantiotopic carbons give mirror images; which one stands for the racemate must not depend on the numbering.
+        int orbit = symmetry.OrbitOf(site.Carbons[0], EquivalenceLevel.Homotopic);
+        foreach (int carbon in site.Carbons)
+        {
+            if (symmetry.OrbitOf(carbon, EquivalenceLevel.Homotopic) == orbit)
+            {
+                continue;
+            }
+
+            Molecule other = ReplaceAt(carbon, halogen);
+            string otherSmiles = CanonicalSmiles.Write(other);
+            if (string.CompareOrdinal(otherSmiles, smiles) < 0)
+            {
+                (product, smiles, orbit) = (other, otherSmiles, symmetry.OrbitOf(carbon, EquivalenceLevel.Homotopic));
+            }
+        }
+
+        return product;
+    }
+
+    /// <summary>The product of a delocalised radical at the far end of a path.</summary>
+    internal Molecule Transpose(int[] path, int halogen, out string smiles)
+    {
+        Molecule product = Transposition.Build(molecule, path, halogen, stereo);
+        smiles = CanonicalSmiles.Write(product);
+        return product;
+    }
+
+    /// <summary>Stereo outcome of direct substitution, by the replacement principle.</summary>
+    internal StereoOutcome Outcome(Site site, int halogen, Molecule product)
+    {
+        int carbon = site.Carbons[0];
+        if (site.HydrogensPerCarbon == 1 && StereoUnits.IsStereocentre(analysis, carbon))
+        {
+            return CarriesHalogen(carbon, halogen) ? StereoOutcome.Lost : StereoOutcome.Epimerised;
+        }
+
+        switch (site.Topicity)
+        {
+            case Topicity.Diastereotopic:
+                return StereoOutcome.Diastereomers;
+            case Topicity.Enantiotopic:
+                return StereoOutcome.Racemic;
+        }
+
+        if (stereo.Length == 0)
+        {
+            return StereoOutcome.None;
+        }
+
+        // Only a halogen of the same kind elsewhere can make two ligands of a centre alike.
+        return ContainsHalogen(halogen) && StereoUnits.Meaningful(product).Length < stereo.Length
+            ? StereoOutcome.Lost
+            : StereoOutcome.Retained;
+    }
+
+    /// <summary>Stereo outcome of a transposed product.</summary>
+    internal StereoOutcome TransposedOutcome(Molecule product)
+    {
+        int open = StereoUnits.CountOpen(product, out int openCentres);
+        int kept = StereoUnits.Meaningful(product).Length;
+        if (open == 1 && openCentres == 1 && !StereoUnits.HasCentre(product))
+        {
+            return StereoOutcome.Racemic;
+        }
+
+        if (open > 0)
+        {
+            return StereoOutcome.Diastereomers;
+        }
+
+        return kept < stereo.Length ? StereoOutcome.Lost : kept > 0 ? StereoOutcome.Retained : StereoOutcome.None;
+    }
+
+    /// <summary>For each product atom the substrate atom, -1 for the halogen.</summary>
+    internal IReadOnlyList<int> AtomMap(Molecule product)
+    {
+        int atomCount = molecule.AtomCount;
+        if (plainMap is null)
+        {
+            plainMap = new int[atomCount + 1];
+            for (int i = 0; i < atomCount; i++)
+            {
+                plainMap[i] = i;
+            }
+
+            plainMap[atomCount] = -1;
+        }
+
+        if (product.AtomCount == plainMap.Length)
+        {
+            return plainMap;
+        }
+
+        // The halogen took the place of a hydrogen that was an atom of the graph.
+        int[] map = plainMap[..atomCount];
+        for (int i = 0; i < atomCount; i++)
+        {
+            map[i] = product.AtomSpan[i].AtomicNumber == molecule.AtomSpan[i].AtomicNumber ? i : -1;
+        }
+
+        return map;
+    }
+
+    private Molecule ReplaceAt(int carbon, int halogen) =>
+        molecule.AtomSpan[carbon].HydrogenCount > 0
+            ? HydrogenReplacement.Replace(molecule, [carbon], halogen, stereo)
+            : HydrogenReplacement.ReplaceGraphHydrogen(molecule, carbon, halogen, stereo);
+
+    private bool CarriesHalogen(int carbon, int halogen)
+    {
+        foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
+        {
+            Atom atom = molecule.AtomSpan[neighbor.Atom];
+            if (atom.AtomicNumber == halogen && atom.MassNumber == 0 && atom.AtomClass == 0
+                && molecule.DegreeOf(neighbor.Atom) == 1)
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+
+    private bool ContainsHalogen(int halogen)
+    {
+        foreach (Atom atom in molecule.AtomSpan)
+        {
+            if (atom.AtomicNumber == halogen)
+            {
+                return true;
+            }
+        }
+
+        return false;
+    }
+}
