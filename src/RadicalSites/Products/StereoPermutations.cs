@@ -8,14 +8,12 @@ namespace RadicalSites.Products;
 internal sealed class StereoPermutations
 {
     private readonly Molecule molecule;
-    private readonly StereoElement[] elements;
     private readonly Dictionary<(int Focus, int End), StereoElement> byFocus = [];
 
-    internal StereoPermutations(Molecule molecule, StereoElement[] elements)
+    internal StereoPermutations(Molecule molecule)
     {
         this.molecule = molecule;
-        this.elements = elements;
-        foreach (StereoElement element in elements)
+        foreach (StereoElement element in molecule.StereoSpan)
         {
             byFocus[(element.Focus, element.FocusEnd)] = element;
             byFocus[(element.FocusEnd, element.Focus)] = element;
@@ -25,7 +23,7 @@ internal sealed class StereoPermutations
     /// <summary>Whether an automorphism maps every element onto one of the same configuration.</summary>
     internal bool Keeps(int[] image)
     {
-        foreach (StereoElement element in elements)
+        foreach (StereoElement element in molecule.StereoSpan)
         {
             if (!byFocus.TryGetValue((image[element.Focus], image[element.FocusEnd]), out StereoElement? there)
                 || there.Kind != element.Kind || !IsSame(element, there, image))

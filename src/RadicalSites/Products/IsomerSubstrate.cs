@@ -1,0 +1,96 @@
+using System;
+using System.Collections.Generic;
+using System.Numerics;
+using RadicalSites.Canonical;
+using RadicalSites.Molecules;
+using RadicalSites.Sites;
+using RadicalSites.Symmetry;
+
+namespace RadicalSites.Products;
+
+/// <summary>A substrate prepared for isomer enumeration: its carbons in canonical order, its meaningful stereo.</summary>
+internal sealed class IsomerSubstrate
+{
+    private IsomerSubstrate(Molecule molecule, int[] carbons, int hydrogens)
+    {
+        Molecule = molecule;
+        Carbons = carbons;
+        HydrogenCount = hydrogens;
+    }
+
+    /// <summary>The substrate with meaningful stereo only, or with none when stereo is not wanted.</summary>
+    internal Molecule Molecule { get; }
+
+    /// <summary>Substitutable carbons in canonical order.</summary>
+    internal int[] Carbons { get; }
+
+    /// <summary>Hydrogens that can be replaced.</summary>
+    internal int HydrogenCount { get; }
+
+    internal static IsomerSubstrate Prepare(Molecule molecule, bool withStereo)
+    {
+        Molecule prepared = withStereo ? StereoPerception.WithoutPhantoms(molecule) : WithoutStereo(molecule);
+        CanonicalRanking ranking = CanonicalRanking.Rank(prepared);
+        var carbons = new List<int>();
+        int hydrogens = 0;
+        for (int atom = 0; atom < prepared.AtomCount; atom++)
+        {
+            if (prepared.AtomSpan[atom].HydrogenCount > 0 && SiteFinder.IsSiteCarbon(prepared, atom))
+            {
+                carbons.Add(atom);
+                hydrogens += prepared.AtomSpan[atom].HydrogenCount;
+            }
+        }
+
+        carbons.Sort((left, right) => ranking.Ranks[left].CompareTo(ranking.Ranks[right]));
+        return new IsomerSubstrate(prepared, [.. carbons], hydrogens);
+    }
+
+    /// <summary>Builds the product of one pattern.</summary>
+    /// <param name="options">Halogen and stereo mode.</param>
+    /// <param name="pattern">Number of halogens by carbon rank.</param>
+    /// <param name="number">1-based number of the product.</param>
+    /// <param name="degeneracy">Number of sets of hydrogens that lead to it.</param>
+    /// <param name="lost">Whether a stated stereo element of the substrate is gone.</param>
+    internal IsomerProduct Make(
+        IsomerOptions options, ReadOnlySpan<byte> pattern, long number, BigInteger degeneracy, out bool lost)
+    {
+        var carbons = new List<int>();
+        for (int rank = 0; rank < pattern.Length; rank++)
+        {
+            for (int i = 0; i < pattern[rank]; i++)
+            {
+                carbons.Add(Carbons[rank]);
+            }
+        }
+
+        carbons.Sort();
+        int[] positions = [.. carbons];
+        Molecule product = HydrogenReplacement.Replace(Molecule, positions, options.Halogen, Molecule.StereoSpan);
+        int[] map = new int[product.AtomCount];
+        for (int i = 0; i < map.Length; i++)
+        {
+            map[i] = i < Molecule.AtomCount ? i : -1;
+        }
+
+        string smiles = CanonicalSmiles.Write(product);
+        lost = product.StereoElements.Count < Molecule.StereoElements.Count
+            || (Molecule.StereoElements.Count > 0
+                && StereoPerception.WithoutPhantoms(product).StereoElements.Count < Molecule.StereoElements.Count);
+        return new IsomerProduct
+        {
+            Number = number,
+            CanonicalSmiles = smiles,
+            Molecule = product,
+            SubstrateAtoms = map,
+            HalogenCarbons = positions,
+            Degeneracy = degeneracy,
+            Stereoisomers = options.Stereo == ProductStereoMode.Expand ? StereoUnits.Expand(product) : null,
+        };
+    }
+
+    private static Molecule WithoutStereo(Molecule molecule) =>
+        molecule.StereoElements.Count == 0 ? molecule : new Molecule(
+            molecule.AtomSpan.ToArray(), molecule.BondSpan.ToArray(), molecule.NeighborOffsets.ToArray(),
+            molecule.NeighborSpan.ToArray(), []);
+}
