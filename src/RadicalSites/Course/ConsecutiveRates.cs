@@ -152,7 +152,7 @@ internal sealed class ConsecutiveRates
             .GetManifestResourceStream("RadicalSites.Data.consecutive_rates.csv")
             ?? throw new InvalidDataException("The embedded table consecutive_rates.csv is missing.");
         using var reader = new StreamReader(stream);
-        return Read(reader, CourseIdentity.Canonicalise);
+        return Read(reader, static smiles => Products.ProductIdentity.SmilesOf(Formats.Smiles.SmilesReader.Parse(smiles)));
     }
 
     private sealed record Row(

@@ -35,6 +35,8 @@ public static partial class ProblemCatalogue
                 Chemistry.Entries,
                 Interference.Entries,
                 Heat.Entries,
+                Products.Entries,
+                Course.Entries,
             }.SelectMany(static list => list).OrderBy(static entry => entry.Code, StringComparer.Ordinal),
         ];
 

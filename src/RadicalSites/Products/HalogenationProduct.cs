@@ -13,7 +13,10 @@ public sealed record HalogenationProduct
     /// <summary>Canonical isomeric SMILES; the new stereocentre is left unspecified.</summary>
     public required string CanonicalSmiles { get; init; }
 
-    /// <summary>The product as a molecule; its first atoms are those of the substrate, the halogen is the last atom.</summary>
+    /// <summary>
+    /// The product as a molecule; its first atoms are those of the substrate, the halogen is the last atom (or stands where
+    /// a hydrogen stood that was an atom of the graph).
+    /// </summary>
     public required Molecule Molecule { get; init; }
 
     /// <summary>For each product atom the 0-based substrate atom it came from, -1 for the halogen.</summary>
@@ -39,4 +42,9 @@ public sealed record HalogenationProduct
 
     /// <summary>Upper end of the 90 % interval of the share.</summary>
     public double? ShareHigh { get; init; }
+
+    /// <summary>
+    /// Canonical SMILES of every stereoisomer that the open units allow, ascending; <see langword="null"/> unless asked for.
+    /// </summary>
+    public IReadOnlyList<string>? Stereoisomers { get; init; }
 }

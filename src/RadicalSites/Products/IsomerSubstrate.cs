@@ -1,7 +1,6 @@
 using System;
 using System.Collections.Generic;
 using System.Numerics;
-using RadicalSites.Canonical;
 using RadicalSites.Molecules;
 using RadicalSites.Sites;
 using RadicalSites.Symmetry;
@@ -73,7 +72,7 @@ internal sealed class IsomerSubstrate
             map[i] = i < Molecule.AtomCount ? i : -1;
         }
 
-        string smiles = CanonicalSmiles.Write(product);
+        string smiles = ProductIdentity.SmilesOf(product);
         lost = product.StereoElements.Count < Molecule.StereoElements.Count
             || (Molecule.StereoElements.Count > 0
                 && StereoPerception.WithoutPhantoms(product).StereoElements.Count < Molecule.StereoElements.Count);

@@ -184,7 +184,7 @@ public static partial class ProductEnumerator
                 Share = share,
                 ShareLow = low,
                 ShareHigh = high,
-                Stereoisomers = options.Stereo == ProductStereoMode.Expand ? substrate.Expand(draft.Molecule, diagnostics) : null,
+                Stereoisomers = options.Stereo == ProductStereoMode.Expand ? StereoUnits.Expand(draft.Molecule) : null,
             };
         }
 

@@ -1,6 +1,5 @@
 using System;
 using System.Collections.Generic;
-using RadicalSites.Canonical;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
 using RadicalSites.Sites;
@@ -30,7 +29,7 @@ internal sealed class ProductSubstrate
     internal Molecule ReplaceAt(Site site, int halogen, out string smiles)
     {
         Molecule product = ReplaceAt(site.Carbons[0], halogen);
-        smiles = CanonicalSmiles.Write(product);
+        smiles = ProductIdentity.SmilesOf(product);
         if (stereo.Length == 0 || analysis.Symmetry is not { } symmetry)
         {
             return product;
@@ -46,7 +45,7 @@ internal sealed class ProductSubstrate
             }
 
             Molecule other = ReplaceAt(carbon, halogen);
-            string otherSmiles = CanonicalSmiles.Write(other);
+            string otherSmiles = ProductIdentity.SmilesOf(other);
             if (string.CompareOrdinal(otherSmiles, smiles) < 0)
             {
                 (product, smiles, orbit) = (other, otherSmiles, symmetry.OrbitOf(carbon, EquivalenceLevel.Homotopic));
@@ -60,7 +59,7 @@ internal sealed class ProductSubstrate
     internal Molecule Transpose(int[] path, int halogen, out string smiles)
     {
         Molecule product = Transposition.Build(molecule, path, halogen, stereo);
-        smiles = CanonicalSmiles.Write(product);
+        smiles = ProductIdentity.SmilesOf(product);
         return product;
     }
 

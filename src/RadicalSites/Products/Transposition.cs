@@ -1,6 +1,7 @@
 using System;
-using System.Collections.Generic;
+using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
+using RadicalSites.Perception;
 
 namespace RadicalSites.Products;
 
@@ -12,81 +13,99 @@ internal static class Transposition
     /// <param name="path">Atoms from the carbon that lost its hydrogen to the end that takes the halogen; odd count.</param>
     /// <param name="halogen">Atomic number of the halogen.</param>
     /// <param name="stereo">Stereo elements of the substrate; those on the path are dropped.</param>
+    /// <returns>The product with aromaticity perceived anew, since a shift can make or break an aromatic ring.</returns>
     internal static Molecule Build(Molecule molecule, int[] path, int halogen, ReadOnlySpan<StereoElement> stereo)
     {
-        int carbon = path[0];
-        int end = path[^1];
-        bool fromGraph = molecule.AtomSpan[carbon].HydrogenCount == 0;
-        Molecule stripped = fromGraph
-            ? HydrogenReplacement.ReplaceGraphHydrogen(molecule, carbon, halogen, [])
-            : HydrogenReplacement.Replace(molecule, [carbon], halogen, []);
-        int halogenAtom = HalogenOf(molecule, stripped, carbon);
-        Atom[] atoms = stripped.AtomSpan.ToArray();
-        Bond[] bonds = stripped.BondSpan.ToArray();
-        bool inRing = false;
-        for (int i = 0; i + 1 < path.Length; i++)
+        var draft = new StructureDraft();
+        int graphHydrogen = GraphHydrogen(molecule, path[0]);
+        for (int i = 0; i < molecule.AtomCount; i++)
         {
-            int index = BondBetween(molecule, path[i], path[i + 1]);
-            Bond bond = bonds[index];
-            BondOrder order = (BondOrder)((int)bond.Order + (i % 2 == 0 ? 1 : -1));
-            bonds[index] = new Bond(bond.Begin, bond.End, order, false, bond.IsInRing);
-            inRing |= bond.IsInRing;
+            Atom atom = molecule.AtomSpan[i];
+            int hydrogens = atom.HydrogenCount - (i == path[0] && graphHydrogen < 0 ? 1 : 0);
+            draft.AddAtom() = Describe(atom, i == graphHydrogen ? halogen : atom.AtomicNumber, hydrogens);
         }
 
-        for (int i = 0; i < bonds.Length; i++)
+        int halogenAtom = graphHydrogen;
+        if (graphHydrogen < 0)
         {
-            if ((bonds[i].Begin == carbon && bonds[i].End == halogenAtom)
-                || (bonds[i].End == carbon && bonds[i].Begin == halogenAtom))
+            halogenAtom = draft.AtomCount;
+            draft.AddAtom() = Describe(default, halogen, 0);
+        }
+        else
+        {
+            draft.Atoms[graphHydrogen] = Describe(default, halogen, 0);
+        }
+
+        foreach (Bond bond in molecule.BondSpan)
+        {
+            bool toHydrogen = bond.Begin == graphHydrogen || bond.End == graphHydrogen;
+            draft.AddBond() = toHydrogen
+                ? new BuilderBond { Begin = path[^1], End = halogenAtom, Order = BondOrder.Single, Position = -1 }
+                : new BuilderBond { Begin = bond.Begin, End = bond.End, Order = Shifted(bond, path), Position = -1 };
+        }
+
+        if (graphHydrogen < 0)
+        {
+            draft.AddBond() = new BuilderBond { Begin = path[^1], End = halogenAtom, Order = BondOrder.Single, Position = -1 };
+        }
+
+        foreach (StereoElement element in stereo)
+        {
+            if (!IsTouched(element, path))
             {
-                bonds[i] = new Bond(end, halogenAtom, BondOrder.Single, false, false);
+                draft.AddStereo(element);
             }
         }
 
-        return MoleculeAssembly.Assemble(atoms, bonds, Keep(stereo, path), perceiveAromaticity: inRing);
+        return MoleculeCompletion.Complete(draft, out FormatProblem? problem)
+            ?? throw new InvalidOperationException(problem!.Message);
     }
 
-    private static int HalogenOf(Molecule molecule, Molecule product, int carbon)
+    private static BuilderAtom Describe(Atom atom, int element, int hydrogens) => new()
     {
-        foreach (Neighbor neighbor in product.NeighborsOf(carbon))
+        Element = (byte)element,
+        Charge = (sbyte)atom.FormalCharge,
+        Hydrogens = (sbyte)hydrogens,
+        Unpaired = (byte)atom.UnpairedElectrons,
+        Isotope = (ushort)atom.MassNumber,
+        AtomClass = atom.AtomClass,
+        Position = -1,
+    };
+
+    private static int GraphHydrogen(Molecule molecule, int carbon)
+    {
+        if (molecule.AtomSpan[carbon].HydrogenCount > 0)
         {
-            if (neighbor.Atom >= molecule.AtomCount
-                || product.AtomSpan[neighbor.Atom].AtomicNumber != molecule.AtomSpan[neighbor.Atom].AtomicNumber)
+            return -1;
+        }
+
+        foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
+        {
+            Atom atom = molecule.AtomSpan[neighbor.Atom];
+            if (atom.AtomicNumber == 1 && atom.MassNumber <= 1)
             {
                 return neighbor.Atom;
             }
         }
 
-        throw new InvalidOperationException("The halogen is a neighbour of the carbon it was put on.");
+        throw new ArgumentException("The carbon carries no hydrogen to replace.", nameof(carbon));
     }
 
-    private static int BondBetween(Molecule molecule, int first, int second)
+    private static BondOrder Shifted(Bond bond, int[] path)
     {
-        foreach (Neighbor neighbor in molecule.NeighborsOf(first))
+        for (int i = 0; i + 1 < path.Length; i++)
         {
-            if (neighbor.Atom == second)
+            if ((bond.Begin == path[i] && bond.End == path[i + 1]) || (bond.End == path[i] && bond.Begin == path[i + 1]))
             {
-                return neighbor.Bond;
+                return (BondOrder)((int)bond.Order + (i % 2 == 0 ? 1 : -1));
             }
         }
 
-        throw new ArgumentException("Consecutive atoms of a path are bonded.", nameof(second));
+        return bond.Order;
     }
 
     // A double bond that moved has lost its configuration, and so has the carbon that became trigonal.
-    private static StereoElement[] Keep(ReadOnlySpan<StereoElement> stereo, int[] path)
-    {
-        var kept = new List<StereoElement>();
-        foreach (StereoElement element in stereo)
-        {
-            bool touched = element.Kind == StereoKind.CisTrans
-                ? Array.IndexOf(path, element.Focus) >= 0 && Array.IndexOf(path, element.FocusEnd) >= 0
-                : Array.IndexOf(path, element.Focus) >= 0;
-            if (!touched)
-            {
-                kept.Add(element);
-            }
-        }
-
-        return [.. kept];
-    }
+    private static bool IsTouched(StereoElement element, int[] path) => element.Kind == StereoKind.CisTrans
+        ? Array.IndexOf(path, element.Focus) >= 0 && Array.IndexOf(path, element.FocusEnd) >= 0
+        : Array.IndexOf(path, element.Focus) >= 0;
 }
