@@ -67,9 +67,11 @@ internal sealed class ProductSubstrate
     internal StereoOutcome Outcome(Site site, int halogen, Molecule product)
     {
         int carbon = site.Carbons[0];
-        if (site.HydrogensPerCarbon == 1 && StereoUnits.IsStereocentre(analysis, carbon))
+        if (site.HydrogensPerCarbon == 1 && site.HeavyHydrogensPerCarbon == 0 && analysis.Symmetry is { } symmetry
+            && StereoUnits.IsStereocentre(symmetry, carbon))
         {
-            return CarriesHalogen(carbon, halogen) ? StereoOutcome.Lost : StereoOutcome.Epimerised;
+            return site.Carbons.Count > 1 && site.Topicity == Topicity.Enantiotopic ? StereoOutcome.Racemic
+                : CarriesHalogen(carbon, halogen) ? StereoOutcome.Lost : StereoOutcome.Epimerised;
         }
 
         switch (site.Topicity)
@@ -94,9 +96,9 @@ internal sealed class ProductSubstrate
     /// <summary>Stereo outcome of a transposed product.</summary>
     internal StereoOutcome TransposedOutcome(Molecule product)
     {
-        int open = StereoUnits.CountOpen(product, out int openCentres);
+        int open = StereoUnits.CountOpen(SymmetryAnalysis.Perceive(product), out int openCentres);
         int kept = StereoUnits.Meaningful(product).Length;
-        if (open == 1 && openCentres == 1 && !StereoUnits.HasCentre(product))
+        if (open == 1 && openCentres == 1 && !StereoUnits.HasStatedCentre(product))
         {
             return StereoOutcome.Racemic;
         }
