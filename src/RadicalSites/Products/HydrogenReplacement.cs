@@ -15,10 +15,12 @@ internal static class HydrogenReplacement
     /// <param name="molecule">The substrate.</param>
     /// <param name="carbons">0-based indices of carbons; each has as many counted hydrogens as it is listed.</param>
     /// <param name="halogen">Atomic number of the halogen.</param>
-    /// <param name="stereo">Stereo elements of the substrate to keep; those at a listed carbon are dropped.</param>
+    /// <param name="stereo">Stereo elements of the substrate to keep; those at a listed carbon are dropped unless rigid.</param>
+    /// <param name="rigid">Listed carbons that a cage holds in shape, so that the halogen takes the place of the hydrogen.</param>
     /// <returns>The product.</returns>
     internal static Molecule Replace(
-        Molecule molecule, ReadOnlySpan<int> carbons, int halogen, ReadOnlySpan<StereoElement> stereo)
+        Molecule molecule, ReadOnlySpan<int> carbons, int halogen, ReadOnlySpan<StereoElement> stereo,
+        ReadOnlySpan<int> rigid = default)
     {
         int atomCount = molecule.AtomCount;
         int bondCount = molecule.BondCount;
@@ -47,7 +49,7 @@ internal static class HydrogenReplacement
             ExtendByMany(molecule, carbons, offsets, neighbors);
         }
 
-        return new Molecule(atoms, bonds, offsets, neighbors, Keep(stereo, carbons));
+        return new Molecule(atoms, bonds, offsets, neighbors, Keep(stereo, carbons, rigid, atomCount));
     }
 
     /// <summary>Replaces a hydrogen that is an atom of the graph (isotope 1 or atom class) by a halogen in its place.</summary>
@@ -62,7 +64,7 @@ internal static class HydrogenReplacement
                 atoms[neighbor.Atom] = new Atom(halogen, 0, 0, 0, 0, AtomFlags.None, 0);
                 return new Molecule(
                     atoms, molecule.BondSpan.ToArray(), molecule.NeighborOffsets.ToArray(),
-                    molecule.NeighborSpan.ToArray(), Keep(stereo, [carbon]));
+                    molecule.NeighborSpan.ToArray(), Keep(stereo, [carbon], default, 0));
             }
         }
 
@@ -117,12 +119,13 @@ internal static class HydrogenReplacement
         offsets[atomCount + carbons.Length] = position;
     }
 
-    private static StereoElement[] Keep(ReadOnlySpan<StereoElement> stereo, ReadOnlySpan<int> carbons)
+    private static StereoElement[] Keep(
+        ReadOnlySpan<StereoElement> stereo, ReadOnlySpan<int> carbons, ReadOnlySpan<int> rigid, int firstHalogen)
     {
         int dropped = 0;
         foreach (StereoElement element in stereo)
         {
-            dropped += carbons.Contains(element.Focus) ? 1 : 0;
+            dropped += carbons.Contains(element.Focus) && !rigid.Contains(element.Focus) ? 1 : 0;
         }
 
         if (stereo.Length == dropped)
@@ -134,9 +137,17 @@ internal static class HydrogenReplacement
         int count = 0;
         foreach (StereoElement element in stereo)
         {
-            if (!carbons.Contains(element.Focus))
+            int place = carbons.IndexOf(element.Focus);
+            if (place < 0)
             {
                 kept[count++] = element;
+            }
+            else if (rigid.Contains(element.Focus))
+            {
+                int[] carriers = element.CarrierSpan.ToArray();
+                carriers.AsSpan().Replace(-1, firstHalogen + place);
+                kept[count++] = new StereoElement(
+                    element.Kind, element.Focus, element.FocusEnd, carriers, element.Configuration);
             }
         }
 

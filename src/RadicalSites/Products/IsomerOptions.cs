@@ -15,4 +15,7 @@ public sealed record IsomerOptions
 
     /// <summary>How stereo is treated; <see cref="ProductStereoMode.Mark"/> by default.</summary>
     public ProductStereoMode Stereo { get; init; } = ProductStereoMode.Mark;
+
+    /// <summary>Most stereoisomers listed for one product when expanding, 1 or more; 1024 by default.</summary>
+    public int StereoisomerLimit { get; init; } = 1024;
 }

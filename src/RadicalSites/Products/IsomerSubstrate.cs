@@ -2,6 +2,7 @@ using System;
 using System.Collections.Generic;
 using System.Numerics;
 using RadicalSites.Molecules;
+using RadicalSites.Perception;
 using RadicalSites.Sites;
 using RadicalSites.Symmetry;
 
@@ -10,8 +11,11 @@ namespace RadicalSites.Products;
 /// <summary>A substrate prepared for isomer enumeration: its carbons in canonical order, its meaningful stereo.</summary>
 internal sealed class IsomerSubstrate
 {
-    private IsomerSubstrate(Molecule molecule, int[] carbons, int hydrogens)
+    private readonly int[] rigid;
+
+    private IsomerSubstrate(Molecule molecule, int[] carbons, int[] rigid, int hydrogens)
     {
+        this.rigid = rigid;
         Molecule = molecule;
         Carbons = carbons;
         HydrogenCount = hydrogens;
@@ -42,7 +46,14 @@ internal sealed class IsomerSubstrate
         }
 
         carbons.Sort((left, right) => ranking.Ranks[left].CompareTo(ranking.Ranks[right]));
-        return new IsomerSubstrate(prepared, [.. carbons], hydrogens);
+        int[] rigid = [];
+        if (prepared.StereoElements.Count > 0)
+        {
+            RingAnalysis rings = RingAnalysis.Perceive(prepared);
+            rigid = [.. carbons.FindAll(atom => prepared.AtomSpan[atom].IsInRing && RingStrain.HoldsShape(rings, atom))];
+        }
+
+        return new IsomerSubstrate(prepared, [.. carbons], rigid, hydrogens);
     }
 
     /// <summary>Builds the product of one pattern.</summary>
@@ -65,7 +76,7 @@ internal sealed class IsomerSubstrate
 
         carbons.Sort();
         int[] positions = [.. carbons];
-        Molecule product = HydrogenReplacement.Replace(Molecule, positions, options.Halogen, Molecule.StereoSpan);
+        Molecule product = HydrogenReplacement.Replace(Molecule, positions, options.Halogen, Molecule.StereoSpan, rigid);
         int[] map = new int[product.AtomCount];
         for (int i = 0; i < map.Length; i++)
         {
@@ -84,7 +95,9 @@ internal sealed class IsomerSubstrate
             SubstrateAtoms = map,
             HalogenCarbons = positions,
             Degeneracy = degeneracy,
-            Stereoisomers = options.Stereo == ProductStereoMode.Expand ? StereoUnits.Expand(product) : null,
+            Stereoisomers = options.Stereo == ProductStereoMode.Expand
+                ? StereoUnits.Expand(product, withMirrorImages: false, options.StereoisomerLimit, null)
+                : null,
         };
     }
 

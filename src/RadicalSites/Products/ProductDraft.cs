@@ -14,6 +14,9 @@ internal sealed class ProductDraft(string smiles, Molecule molecule)
 
     internal StereoOutcome Stereo { get; set; }
 
+    /// <summary>Whether a site has enantiotopic carbons, so that the mirror image forms as well.</summary>
+    internal bool HasMirrorImage { get; set; }
+
     /// <summary>Sites with the part of their share that comes here; <see cref="double.NaN"/> = unknown part.</summary>
     internal List<(int Site, int Hydrogens, double Part, double PartLow, double PartHigh)> Origins { get; } = [];
 

@@ -11,7 +11,7 @@ public static partial class ProductEnumerator
     private sealed partial class Work
     {
         // Direct product and those at the other ends of the radical; equal products need no split.
-        private void AddDelocalised(Site site, Molecule direct, string directSmiles)
+        private void AddDelocalised(Site site, Molecule direct, string directSmiles, bool hasMirrorImage)
         {
             var paths = new List<int[]>();
             DelocalisationBarriers barriers = DelocalisationWalk.Find(analysis.Molecule, site.Carbons[0], paths);
@@ -38,6 +38,7 @@ public static partial class ProductEnumerator
                     ? substrate.Outcome(site, halogen, molecule)
                     : substrate.TransposedOutcome(molecule));
                 draft.Route = route == ProductRoute.Direct ? route : draft.Route;
+                draft.HasMirrorImage |= hasMirrorImage;
                 if (ends.Count == 1)
                 {
                     draft.Add(site.Number, site.HydrogenCount, 1, 1, 1);

@@ -61,17 +61,18 @@ public static partial class ProductEnumerator
                 diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.SiteShareMissing, site.Carbons, site.Number));
             }
 
-            Molecule direct = substrate.ReplaceAt(site, halogen, out string smiles);
+            Molecule direct = substrate.ReplaceAt(site, halogen, out string smiles, out bool hasMirrorImage);
             if (site.Conjugation.Count == 0 || !options.IncludeTransposed)
             {
                 ProductDraft draft = Find(smiles, direct);
                 Classify(draft, site, substrate.Outcome(site, halogen, direct));
                 draft.Route = ProductRoute.Direct;
+                draft.HasMirrorImage |= hasMirrorImage;
                 draft.Add(site.Number, site.HydrogenCount, 1, 1, 1);
             }
             else
             {
-                AddDelocalised(site, direct, smiles);
+                AddDelocalised(site, direct, smiles, hasMirrorImage);
             }
         }
 
@@ -184,7 +185,9 @@ public static partial class ProductEnumerator
                 Share = share,
                 ShareLow = low,
                 ShareHigh = high,
-                Stereoisomers = options.Stereo == ProductStereoMode.Expand ? StereoUnits.Expand(draft.Molecule) : null,
+                Stereoisomers = options.Stereo == ProductStereoMode.Expand
+                    ? StereoUnits.Expand(draft.Molecule, draft.HasMirrorImage, options.StereoisomerLimit, diagnostics)
+                    : null,
             };
         }
 

@@ -12,4 +12,7 @@ public sealed record ProductOptions
 
     /// <summary>Whether products at the other ends of delocalised radicals are listed; on by default.</summary>
     public bool IncludeTransposed { get; init; } = true;
+
+    /// <summary>Most stereoisomers listed for one product when expanding, 1 or more; 1024 by default.</summary>
+    public int StereoisomerLimit { get; init; } = 1024;
 }

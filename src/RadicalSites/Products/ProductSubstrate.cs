@@ -14,6 +14,7 @@ internal sealed class ProductSubstrate
     private readonly Molecule molecule;
     private readonly StereoElement[] stereo;
     private int[]? plainMap;
+    private IReadOnlyList<StereoUnit>? units;
 
     private ProductSubstrate(SiteAnalysis analysis, StereoElement[] stereo)
     {
@@ -26,11 +27,16 @@ internal sealed class ProductSubstrate
         new(analysis, options.Stereo == ProductStereoMode.None ? [] : StereoUnits.Meaningful(analysis.Molecule));
 
     /// <summary>The product of substitution at a site, in the one of two mirror images whose SMILES sorts first.</summary>
-    internal Molecule ReplaceAt(Site site, int halogen, out string smiles)
+    /// <param name="site">The site.</param>
+    /// <param name="halogen">Atomic number of the halogen.</param>
+    /// <param name="smiles">Canonical SMILES.</param>
+    /// <param name="hasMirrorImage">Whether the site has enantiotopic carbons, so that the mirror image forms as well.</param>
+    internal Molecule ReplaceAt(Site site, int halogen, out string smiles, out bool hasMirrorImage)
     {
-        Molecule product = ReplaceAt(site.Carbons[0], halogen);
+        Molecule product = ReplaceAt(site, site.Carbons[0], halogen);
         smiles = ProductIdentity.SmilesOf(product);
-        if (stereo.Length == 0 || analysis.Symmetry is not { } symmetry)
+        hasMirrorImage = false;
+        if (stereo.Length == 0 || site.Carbons.Count == 1 || analysis.Symmetry is not { } symmetry)
         {
             return product;
         }
@@ -44,12 +50,15 @@ internal sealed class ProductSubstrate
                 continue;
             }
 
-            Molecule other = ReplaceAt(carbon, halogen);
+            hasMirrorImage = true;
+            Molecule other = ReplaceAt(site, carbon, halogen);
             string otherSmiles = ProductIdentity.SmilesOf(other);
             if (string.CompareOrdinal(otherSmiles, smiles) < 0)
             {
-                (product, smiles, orbit) = (other, otherSmiles, symmetry.OrbitOf(carbon, EquivalenceLevel.Homotopic));
+                (product, smiles) = (other, otherSmiles);
             }
+
+            break;
         }
 
         return product;
@@ -67,10 +76,10 @@ internal sealed class ProductSubstrate
     internal StereoOutcome Outcome(Site site, int halogen, Molecule product)
     {
         int carbon = site.Carbons[0];
-        if (site.HydrogensPerCarbon == 1 && site.HeavyHydrogensPerCarbon == 0 && analysis.Symmetry is { } symmetry
-            && StereoUnits.IsStereocentre(symmetry, carbon))
+        if (site.HydrogensPerCarbon == 1 && site.HeavyHydrogensPerCarbon == 0 && !RingStrain.HoldsShape(site)
+            && analysis.Symmetry is { } symmetry && StereoUnits.IsStereocentre(symmetry, carbon, ref units))
         {
-            return site.Carbons.Count > 1 && site.Topicity == Topicity.Enantiotopic ? StereoOutcome.Racemic
+            return site.Topicity == Topicity.Enantiotopic ? StereoOutcome.Racemic
                 : CarriesHalogen(carbon, halogen) ? StereoOutcome.Lost : StereoOutcome.Epimerised;
         }
 
@@ -96,7 +105,7 @@ internal sealed class ProductSubstrate
     /// <summary>Stereo outcome of a transposed product.</summary>
     internal StereoOutcome TransposedOutcome(Molecule product)
     {
-        int open = StereoUnits.CountOpen(SymmetryAnalysis.Perceive(product), out int openCentres);
+        int open = StereoUnits.CountOpen(product, out int openCentres);
         int kept = StereoUnits.Meaningful(product).Length;
         if (open == 1 && openCentres == 1 && !StereoUnits.HasStatedCentre(product))
         {
@@ -141,9 +150,10 @@ internal sealed class ProductSubstrate
         return map;
     }
 
-    private Molecule ReplaceAt(int carbon, int halogen) =>
+    private Molecule ReplaceAt(Site site, int carbon, int halogen) =>
         molecule.AtomSpan[carbon].HydrogenCount > 0
-            ? HydrogenReplacement.Replace(molecule, [carbon], halogen, stereo)
+            ? HydrogenReplacement.Replace(
+                molecule, [carbon], halogen, stereo, stereo.Length > 0 && RingStrain.HoldsShape(site) ? [carbon] : [])
             : HydrogenReplacement.ReplaceGraphHydrogen(molecule, carbon, halogen, stereo);
 
     private bool CarriesHalogen(int carbon, int halogen)

@@ -1,5 +1,6 @@
 using RadicalSites.Molecules;
 using RadicalSites.Perception;
+using RadicalSites.Sites;
 
 namespace RadicalSites.Products;
 
@@ -13,6 +14,13 @@ internal static class RingStrain
 {
     private const int SmallestBridgeheadRing = 8;
     private const int SmallestCumulatedRing = 9;
+
+    /// <summary>Whether a small cage keeps the radical centre from turning inside out.</summary>
+    internal static bool HoldsShape(Site site) => site.IsBridgehead && site.RingSize < SmallestBridgeheadRing;
+
+    /// <summary>Whether an atom is a bridgehead of a small cage.</summary>
+    internal static bool HoldsShape(RingAnalysis rings, int atom) =>
+        rings.IsBridgehead(atom) && rings.SmallestRingSize(atom) < SmallestBridgeheadRing;
 
     /// <summary>Whether the shift of a pi bond to the bond radical-first is impossible.</summary>
     internal static bool Forbids(Molecule molecule, int radical, Neighbor first, Bond pi)
@@ -29,7 +37,6 @@ internal static class RingStrain
             return true;
         }
 
-        return (rings.IsBridgehead(radical) && rings.SmallestRingSize(radical) < SmallestBridgeheadRing)
-            || (rings.IsBridgehead(first.Atom) && rings.SmallestRingSize(first.Atom) < SmallestBridgeheadRing);
+        return HoldsShape(rings, radical) || HoldsShape(rings, first.Atom);
     }
 }

@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
 using RadicalSites.Symmetry;
 
@@ -12,71 +13,72 @@ internal static class StereoUnits
     internal static StereoElement[] Meaningful(Molecule molecule) =>
         molecule.StereoElements.Count == 0 ? [] : StereoPerception.WithoutPhantoms(molecule).StereoSpan.ToArray();
 
-    /// <summary>Whether a saturated carbon is a stereocentre, stated or not.</summary>
-    /// <remarks>
-    /// Four ligands of different kind make one. Two like ligands in a ring make one too when another ring atom carries two
-    /// unlike ligands, so that the two faces of the ring differ (1,4-dimethylcyclohexane); outside rings they do when
-    /// stated configurations make them mirror images (pseudoasymmetry).
-    /// </remarks>
-    internal static bool IsStereocentre(SymmetryAnalysis symmetry, int atom)
+    /// <summary>Whether a CH carbon is a stereocentre, stated or not.</summary>
+    /// <param name="symmetry">Symmetry of the molecule.</param>
+    /// <param name="atom">0-based index of the carbon.</param>
+    /// <param name="units">Stereo units of the molecule, found when they are first needed.</param>
+    internal static bool IsStereocentre(SymmetryAnalysis symmetry, int atom, ref IReadOnlyList<StereoUnit>? units)
     {
         Molecule molecule = symmetry.Molecule;
-        Atom data = molecule.AtomSpan[atom];
         ReadOnlySpan<Neighbor> neighbors = molecule.NeighborsOf(atom);
-        if (data.AtomicNumber != 6 || data.HydrogenCount > 1 || neighbors.Length + data.HydrogenCount != 4)
+        if (neighbors.Length != 3)
         {
             return false;
         }
 
-        for (int i = 0; i < neighbors.Length; i++)
+        // Three ligands of different constitution and a hydrogen make a centre; three bonds to leaves decide as quickly.
+        bool unlike = true;
+        for (int i = 0; i < 3; i++)
         {
-            for (int j = i + 1; j < neighbors.Length; j++)
+            for (int j = i + 1; j < 3; j++)
             {
-                Topicity relation = symmetry.Between(neighbors[i].Atom, neighbors[j].Atom);
-                if (relation > Topicity.Enantiotopic)
-                {
-                    continue;
-                }
-
-                bool inRing = molecule.BondSpan[neighbors[i].Bond].IsInRing && molecule.BondSpan[neighbors[j].Bond].IsInRing;
-                bool apart = inRing
-                    ? HasFacePartner(symmetry, atom)
-                    : relation == Topicity.Enantiotopic && molecule.StereoElements.Count > 0 && WouldMean(molecule, atom);
-                if (!apart)
+                bool like = symmetry.OrbitOf(neighbors[i].Atom, EquivalenceLevel.Constitutional)
+                    == symmetry.OrbitOf(neighbors[j].Atom, EquivalenceLevel.Constitutional);
+                unlike &= !like;
+                if (like && molecule.DegreeOf(neighbors[i].Atom) == 1)
                 {
                     return false;
                 }
             }
         }
 
-        return true;
-    }
-
-    /// <summary>Stereo units that state nothing.</summary>
-    internal static int CountOpen(SymmetryAnalysis symmetry, out int centres)
-    {
-        Molecule molecule = symmetry.Molecule;
-        centres = 0;
-        for (int atom = 0; atom < molecule.AtomCount; atom++)
+        if (unlike)
         {
-            centres += !IsStated(molecule, atom, atom) && IsStereocentre(symmetry, atom) ? 1 : 0;
+            return true;
         }
 
-        int bonds = 0;
-        foreach (Bond bond in molecule.BondSpan)
+        units ??= StereoPerception.FindUnits(molecule);
+        foreach (StereoUnit unit in units)
         {
-            if (bond.Order == BondOrder.Double && !bond.IsAromatic && !bond.IsInRing
-                && !IsStated(molecule, bond.Begin, bond.End)
-                && HasUnlikeLigands(symmetry, bond.Begin, bond.End) && HasUnlikeLigands(symmetry, bond.End, bond.Begin))
+            if (unit.Focus == atom && unit.Kind == StereoKind.Tetrahedral)
             {
-                bonds++;
+                return true;
             }
         }
 
-        return centres + bonds;
+        return false;
     }
 
-    /// <summary>Whether a tetrahedral centre or allene axis is stated.</summary>
+    /// <summary>Stereo units that state nothing.</summary>
+    /// <param name="molecule">A product.</param>
+    /// <param name="centres">How many of them are centres or axes and not double bonds.</param>
+    internal static int CountOpen(Molecule molecule, out int centres)
+    {
+        int open = 0;
+        centres = 0;
+        foreach (StereoUnit unit in StereoPerception.FindUnits(molecule))
+        {
+            if (!unit.IsStated)
+            {
+                open++;
+                centres += unit.Kind == StereoKind.CisTrans ? 0 : 1;
+            }
+        }
+
+        return open;
+    }
+
+    /// <summary>Whether a centre or axis is stated.</summary>
     internal static bool HasStatedCentre(Molecule molecule)
     {
         foreach (StereoElement element in molecule.StereoSpan)
@@ -90,99 +92,41 @@ internal static class StereoUnits
         return false;
     }
 
-    private static bool HasFacePartner(SymmetryAnalysis symmetry, int atom)
+    /// <summary>Canonical SMILES of the stereoisomers that the open units allow, ascending.</summary>
+    /// <param name="molecule">A product.</param>
+    /// <param name="withMirrorImages">Whether the mirror images of all of them are formed too.</param>
+    /// <param name="limit">Most isomers to list.</param>
+    /// <param name="diagnostics">Receives a remark when the limit cuts the list.</param>
+    internal static string[] Expand(Molecule molecule, bool withMirrorImages, int limit, List<Diagnostic>? diagnostics)
     {
-        Molecule molecule = symmetry.Molecule;
-        for (int other = 0; other < molecule.AtomCount; other++)
+        StereoisomerSet set = StereoisomerEnumeration.Enumerate(molecule, onlyUnspecified: true, limit);
+        diagnostics?.AddRange(set.Diagnostics);
+        var texts = new SortedSet<string>(StringComparer.Ordinal);
+        foreach (Stereoisomer isomer in set.Stereoisomers)
         {
-            if (other == atom || !molecule.AtomSpan[other].IsInRing || molecule.AtomSpan[other].HydrogenCount > 1)
+            texts.Add(ProductIdentity.SmilesOf(isomer.Molecule));
+            if (withMirrorImages)
             {
-                continue;
-            }
-
-            int first = -1;
-            int outside = molecule.AtomSpan[other].HydrogenCount;
-            bool unlike = outside > 0;
-            foreach (Neighbor neighbor in molecule.NeighborsOf(other))
-            {
-                if (molecule.BondSpan[neighbor.Bond].IsInRing || molecule.BondSpan[neighbor.Bond].Order != BondOrder.Single)
-                {
-                    continue;
-                }
-
-                unlike |= first >= 0 && symmetry.Between(first, neighbor.Atom) > Topicity.Enantiotopic;
-                first = neighbor.Atom;
-                outside++;
-            }
-
-            if (outside == 2 && unlike)
-            {
-                return true;
+                texts.Add(ProductIdentity.SmilesOf(MirrorImage(isomer.Molecule)));
             }
         }
 
-        return false;
+        return [.. texts];
     }
 
-    // States a configuration and sees whether it makes a difference.
-    private static bool WouldMean(Molecule molecule, int atom)
+    private static Molecule MirrorImage(Molecule molecule)
     {
-        if (IsStated(molecule, atom, atom))
+        StereoElement[] turned = molecule.StereoSpan.ToArray();
+        for (int i = 0; i < turned.Length; i++)
         {
-            return Array.Exists(Meaningful(molecule), element => element.Focus == atom);
-        }
-
-        Span<int> carriers = [-1, -1, -1, -1];
-        ReadOnlySpan<Neighbor> neighbors = molecule.NeighborsOf(atom);
-        for (int i = 0; i < neighbors.Length; i++)
-        {
-            carriers[i] = neighbors[i].Atom;
-        }
-
-        StereoElement[] stated =
-            [.. molecule.StereoSpan, new StereoElement(StereoKind.Tetrahedral, atom, atom, carriers.ToArray(), 1)];
-        Array.Sort(stated, static (left, right) => left.Focus.CompareTo(right.Focus));
-        return Array.Exists(Meaningful(molecule.WithStereo(stated)), element => element.Focus == atom);
-    }
-
-    private static bool HasUnlikeLigands(SymmetryAnalysis symmetry, int end, int partner)
-    {
-        Molecule molecule = symmetry.Molecule;
-        int first = -1;
-        int count = molecule.AtomSpan[end].HydrogenCount;
-        bool unlike = count == 1;
-        foreach (Neighbor neighbor in molecule.NeighborsOf(end))
-        {
-            if (neighbor.Atom == partner)
+            if (turned[i].Kind is StereoKind.Tetrahedral or StereoKind.Allene)
             {
-                continue;
-            }
-
-            if (molecule.BondSpan[neighbor.Bond].Order != BondOrder.Single)
-            {
-                return false;
-            }
-
-            unlike |= first >= 0 && symmetry.Between(first, neighbor.Atom) > Topicity.Enantiotopic;
-            first = neighbor.Atom;
-            count++;
-        }
-
-        return count == 2 && first >= 0 && unlike;
-    }
-
-    private static bool IsStated(Molecule molecule, int begin, int end)
-    {
-        foreach (StereoElement element in molecule.StereoSpan)
-        {
-            if ((element.Focus == begin && element.FocusEnd == end) || (element.Focus == end && element.FocusEnd == begin))
-            {
-                return true;
+                turned[i] = new StereoElement(
+                    turned[i].Kind, turned[i].Focus, turned[i].FocusEnd, turned[i].CarrierSpan.ToArray(),
+                    3 - turned[i].Configuration);
             }
         }
 
-        return false;
+        return molecule.WithStereo(turned);
     }
-
-    internal static IReadOnlyList<string> Expand(Molecule molecule) => throw new NotSupportedException(molecule.ToString());
 }

@@ -31,7 +31,7 @@ public class ProductEnumeratorTests
     [InlineData("C1C2CC3CC1CC(C2)C3", "ClC1C2CC3CC1CC(C2)C3 12 d None|C1C2(Cl)CC3CC1CC(C2)C3 4 d None")]
     [InlineData("C[C@H](Cl)[C@H](Cl)C", "ClC[C@H](Cl)[C@H](Cl)C 6 d Racemic|CC(Cl)(Cl)[C@H](Cl)C 2 d Racemic")]
     [InlineData("C[C@H](Cl)[C@@H](Cl)C", "ClC[C@H](Cl)[C@@H](Cl)C 6 d Retained|CC(Cl)(Cl)[C@@H](Cl)C 2 d Lost")]
-    [InlineData("C[C@H](F)C(O)[C@@H](F)C", "")]
+    [InlineData("C[C@H](F)C(O)[C@@H](F)C", "ClC[C@H](F)C(O)[C@@H](F)C 6 d Diastereomers|CC(Cl)(F)C(O)[C@@H](F)C 2 d Epimerised|C[C@H](F)C(O)(Cl)[C@@H](F)C 1 d Retained")]
     [InlineData("OC(=O)[C@@H](N)C(C)C", "OC(=O)C(Cl)(N)C(C)C 1 d Epimerised|OC(=O)[C@@H](N)C(C)CCl 6 d Diastereomers|OC(=O)[C@@H](N)C(C)(C)Cl 1 d Retained")]
     [InlineData("[2H]C([2H])([2H])C", "[2H]C([2H])([2H])CCl 3 d None")]
     [InlineData("CC.CC", "CCCl.CC 12 d None")]
