@@ -1,8 +1,7 @@
 using System;
 using System.Collections.Generic;
-using System.Globalization;
-using System.IO;
-using System.Text;
+using System.Linq;
+using RadicalSites.Diagnostics;
 
 namespace RadicalSites.Heat;
 
@@ -50,78 +49,24 @@ public static class HeatTables
 
     private static class Holder
     {
-        internal static readonly Solvent[] Solvents = Read("solvents.csv", 10, static row => new Solvent(
-            row[0], row[1], row[2], Number(row[3]), Number(row[4]), Number(row[5]), row[6], row[7], row[8], row[9]));
+        internal static readonly Solvent[] Solvents =
+        [
+            .. CsvTable.ReadEmbedded(
+                "solvents.csv", "id", "name", "smiles", "density", "heat_capacity", "boiling_point", "role", "source",
+                "locator", "caution").Rows.Select(static row => new Solvent(
+                row.Required("id"), row.Required("name"), row.Required("smiles"), row.Number("density", 0.3, 5),
+                row.Number("heat_capacity", 0.3, 5), row.Number("boiling_point", -50, 500), row.Required("role"),
+                row.Required("source"), row.Required("locator"), row.Text("caution"))),
+        ];
 
-        internal static readonly ReagentProperties[] Reagents = Read("reagent_properties.csv", 10, static row =>
-            new ReagentProperties(
-                row[0], row[1], row[2], row[3], row[4].Length == 0 ? null : Number(row[4]),
-                row[5].Length == 0 ? [] : row[5].Split(';'), row[6], row[7], row[8], row[9]));
-
-        private static T[] Read<T>(string name, int columns, Func<string[], T> make)
-        {
-            using Stream stream = typeof(HeatTables).Assembly.GetManifestResourceStream("RadicalSites.Data." + name)
-                ?? throw new InvalidDataException($"The embedded table {name} is missing; the assembly is damaged.");
-            using var reader = new StreamReader(stream);
-            var rows = new List<T>();
-            bool header = true;
-            while (reader.ReadLine() is { } line)
-            {
-                if (line.Length == 0 || line[0] == '#')
-                {
-                    continue;
-                }
-
-                string[] fields = Split(line);
-                if (fields.Length != columns)
-                {
-                    throw new InvalidDataException($"Table {name}: a row has {fields.Length} fields instead of {columns}: {line}");
-                }
-
-                if (!header)
-                {
-                    rows.Add(make(fields));
-                }
-
-                header = false;
-            }
-
-            return rows.ToArray();
-        }
-
-        // One line of RFC 4180 without line breaks inside a field.
-        private static string[] Split(string line)
-        {
-            var fields = new List<string>();
-            var field = new StringBuilder();
-            bool quoted = false;
-            for (int i = 0; i < line.Length; i++)
-            {
-                char c = line[i];
-                if (quoted && c == '"' && i + 1 < line.Length && line[i + 1] == '"')
-                {
-                    field.Append('"');
-                    i++;
-                }
-                else if (c == '"')
-                {
-                    quoted = !quoted;
-                }
-                else if (c == ',' && !quoted)
-                {
-                    fields.Add(field.ToString());
-                    field.Clear();
-                }
-                else
-                {
-                    field.Append(c);
-                }
-            }
-
-            fields.Add(field.ToString());
-            return fields.ToArray();
-        }
-
-        private static double Number(string text) => double.Parse(text, NumberStyles.Float, CultureInfo.InvariantCulture);
+        internal static readonly ReagentProperties[] Reagents =
+        [
+            .. CsvTable.ReadEmbedded(
+                "reagent_properties.csv", "id", "name", "smiles", "state", "density", "gases", "exposure_limit", "source",
+                "locator", "caution").Rows.Select(static row => new ReagentProperties(
+                row.Required("id"), row.Required("name"), row.Required("smiles"), row.Required("state"),
+                row.OptionalNumber("density", 0.3, 10), row.Text("gases") is { Length: > 0 } gases ? gases.Split(';') : [],
+                row.Required("exposure_limit"), row.Required("source"), row.Required("locator"), row.Required("caution"))),
+        ];
     }
 }

@@ -1,8 +1,7 @@
 using System;
 using System.Collections.Frozen;
 using System.Collections.Generic;
-using System.Globalization;
-using System.IO;
+using RadicalSites.Diagnostics;
 
 namespace RadicalSites.Molecules;
 
@@ -45,12 +44,9 @@ public static class AtomicWeights
         {
             var weights = new double[Elements.Last + 1];
             Array.Fill(weights, double.NaN);
-            foreach (string[] row in Rows("elements.csv"))
+            foreach (CsvRow row in CsvTable.ReadEmbedded("elements.csv", "atomic_number", "symbol", "atomic_weight").Rows)
             {
-                if (row[2].Length > 0)
-                {
-                    weights[Integer(row[0])] = Number(row[2]);
-                }
+                weights[row.Integer("atomic_number", 1, Elements.Last)] = row.OptionalNumber("atomic_weight", 1, 400) ?? double.NaN;
             }
 
             return weights;
@@ -59,39 +55,14 @@ public static class AtomicWeights
         private static FrozenDictionary<(int Element, int MassNumber), double> ReadNuclides()
         {
             var masses = new Dictionary<(int Element, int MassNumber), double>();
-            foreach (string[] row in Rows("isotopes.csv"))
+            foreach (CsvRow row in CsvTable.ReadEmbedded("isotopes.csv", "atomic_number", "mass_number", "mass").Rows)
             {
-                masses.Add((Integer(row[0]), Integer(row[1])), Number(row[2]));
+                masses.Add(
+                    (row.Integer("atomic_number", 1, Elements.Last), row.Integer("mass_number", 1, 400)),
+                    row.Number("mass", 1, 400));
             }
 
             return masses.ToFrozenDictionary();
         }
-
-        private static IEnumerable<string[]> Rows(string name)
-        {
-            using Stream stream = typeof(AtomicWeights).Assembly.GetManifestResourceStream("RadicalSites.Data." + name)
-                ?? throw new InvalidDataException($"The embedded table {name} is missing; the assembly is damaged.");
-            using var reader = new StreamReader(stream);
-            bool header = true;
-            while (reader.ReadLine() is { } line)
-            {
-                if (line.Length == 0 || line[0] == '#')
-                {
-                    continue;
-                }
-
-                if (!header)
-                {
-                    yield return line.Split(',');
-                }
-
-                header = false;
-            }
-        }
-
-        private static int Integer(string text) => int.Parse(text, NumberStyles.None, CultureInfo.InvariantCulture);
-
-        private static double Number(string text) =>
-            double.Parse(text, NumberStyles.AllowDecimalPoint, CultureInfo.InvariantCulture);
     }
 }
