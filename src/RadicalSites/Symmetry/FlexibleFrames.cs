@@ -7,45 +7,98 @@ namespace RadicalSites.Symmetry;
 /// Finds frames that can always be turned over on the spot, because two of their ligands are like branches that hold no
 /// configuration of their own: isopropyl, gem-dialkyl, sulfonyl. Such a frame never restricts the rest of the molecule.
 /// </summary>
-internal readonly ref struct FlexibleFrames
+/// <remarks>Not thread-safe: one belongs to each workspace.</remarks>
+internal sealed class FlexibleFrames
 {
-    private readonly SymmetryGraph graph;
-    private readonly ReadOnlySpan<int> orbits;
-    private readonly sbyte[] state;
+    private readonly Stack<int> open = new();
+    private readonly List<int> branch = [];
+    private SymmetryGraph graph = new();
+    private ColorPartition cells = new();
+    private int[] orbits = [];
+    private int[] seen = [];
+    private int mark;
 
-    private FlexibleFrames(SymmetryGraph graph, ReadOnlySpan<int> orbits, sbyte[] state)
-    {
-        this.graph = graph;
-        this.orbits = orbits;
-        this.state = state;
-    }
+    /// <summary>1 = flexible, -1 = rigid, by element.</summary>
+    internal sbyte[] State = [];
 
-    /// <summary>Marks each element of the graph.</summary>
-    /// <param name="graph">Graph with its frames.</param>
-    /// <param name="orbits">Constitutional orbit by atom.</param>
-    /// <returns>1 = flexible, -1 = rigid, by element.</returns>
-    internal static sbyte[] Find(SymmetryGraph graph, ReadOnlySpan<int> orbits)
+    /// <summary>By atom, the number of flexible frames that turn over by moving it; double bonds count twice.</summary>
+    internal int[] Depth = [];
+
+    /// <summary>By fragment, what its frames say about mirroring it.</summary>
+    internal MirrorState[] Fragments = [];
+
+    /// <summary>By fragment, whether a rigid double bond could be reversed by an automorphism.</summary>
+    internal bool[] HasOpenAxis = [];
+
+    /// <summary>Looks at each element of a workspace's graph.</summary>
+    /// <param name="workspace">Workspace with the frames added.</param>
+    /// <param name="constitutional">Constitutional orbit by atom.</param>
+    internal void Find(SymmetryWorkspace workspace, int[] constitutional)
     {
-        sbyte[] state = new sbyte[graph.ElementCount];
-        FlexibleFrames finder = new(graph, orbits, state);
-        for (int e = 0; e < state.Length; e++)
+        graph = workspace.Graph;
+        cells = workspace.Constitution;
+        orbits = constitutional;
+        int n = graph.AtomCount;
+        if (Depth.Length < n)
         {
-            finder.IsFlexible(e);
+            Depth = new int[Math.Max(64, n)];
+            seen = new int[Depth.Length];
+            mark = 0;
         }
 
-        return state;
+        if (State.Length < graph.ElementCount)
+        {
+            State = new sbyte[graph.Kind.Length];
+        }
+
+        if (Fragments.Length < graph.FragmentCount)
+        {
+            Fragments = new MirrorState[Math.Max(8, graph.FragmentCount)];
+            HasOpenAxis = new bool[Fragments.Length];
+        }
+
+        Array.Clear(Depth, 0, n);
+        Array.Clear(State, 0, graph.ElementCount);
+        Array.Clear(Fragments, 0, graph.FragmentCount);
+        Array.Clear(HasOpenAxis, 0, graph.FragmentCount);
+        for (int e = 0; e < graph.ElementCount; e++)
+        {
+            if (!IsFlexible(e))
+            {
+                Restrict(e);
+            }
+        }
+    }
+
+    /// <summary>
+    /// A rigid chiral frame that no operation can move, with ligands all unlike, makes its fragment chiral; a
+    /// double bond of that kind is kept by every operation.
+    /// </summary>
+    private void Restrict(int element)
+    {
+        int focus = graph.Focus[element];
+        ref MirrorState state = ref Fragments[graph.FragmentIndexOf(focus)];
+        bool held = cells.Length[cells.CellOf[focus]] == 1 && cells.Length[cells.CellOf[graph.FocusEnd[element]]] == 1
+            && graph.ResolvedSign(element, cells.CellOf, graph.Configuration) != 0;
+        if (graph.Kind[element] == SymmetryGraph.Axis)
+        {
+            HasOpenAxis[graph.FragmentIndexOf(focus)] |= !held;
+            return;
+        }
+
+        state = held ? MirrorState.Never : state == MirrorState.Never ? state : MirrorState.Open;
     }
 
     private bool IsFlexible(int element)
     {
-        if (state[element] == 0)
+        if (State[element] == 0)
         {
             // Guards against going round; a frame inside its own branch cannot occur in a tree-like branch.
-            state[element] = -1;
-            state[element] = HasLikeBranches(element) ? (sbyte)1 : (sbyte)-1;
+            State[element] = -1;
+            State[element] = HasLikeBranches(element) ? (sbyte)1 : (sbyte)-1;
         }
 
-        return state[element] > 0;
+        return State[element] > 0;
     }
 
     private bool HasLikeBranches(int element)
@@ -54,19 +107,12 @@ internal readonly ref struct FlexibleFrames
         bool paired = graph.Kind[element] != SymmetryGraph.Center;
         for (int i = 0; i < 4; i++)
         {
-            for (int j = i + 1; j < 4; j++)
+            int one = carriers[i];
+            for (int j = i + 1; j < 4 && one >= 0; j++)
             {
-                int one = carriers[i];
                 int two = carriers[j];
-                if (one < 0 || two < 0 || orbits[one] != orbits[two] || (paired && (i / 2 != j / 2)))
-                {
-                    continue;
-                }
-
-                int stem = !paired ? graph.Focus[element]
-                    : graph.WeightBetween(one, graph.Focus[element]) == SymmetryGraph.SingleWeight ? graph.Focus[element]
-                    : StemOf(one, two);
-                if (stem >= 0 && IsFreeBranch(one, stem))
+                if (two >= 0 && orbits[one] == orbits[two] && (!paired || i / 2 == j / 2)
+                    && MarkBranches(one, StemOf(element, one, two), graph.Kind[element] == SymmetryGraph.Axis ? 2 : 1))
                 {
                     return true;
                 }
@@ -76,8 +122,14 @@ internal readonly ref struct FlexibleFrames
         return false;
     }
 
-    private int StemOf(int one, int two)
+    /// <summary>The atom that carries both ligands.</summary>
+    private int StemOf(int element, int one, int two)
     {
+        if (graph.Kind[element] == SymmetryGraph.Center)
+        {
+            return graph.Focus[element];
+        }
+
         for (int i = graph.Offset[one]; i < graph.Offset[one + 1]; i++)
         {
             if (graph.WeightBetween(graph.Adjacent[i], two) != 0)
@@ -89,25 +141,45 @@ internal readonly ref struct FlexibleFrames
         return -1;
     }
 
-    /// <summary>Whether what hangs on the stem through an atom comes back nowhere and holds no rigid frame.</summary>
-    private bool IsFreeBranch(int root, int stem)
+    /// <summary>Counts all like branches of a stem as movable when they come back nowhere and hold no rigid frame.</summary>
+    private bool MarkBranches(int root, int stem, int weight)
     {
+        if (stem < 0 || !WalkBranch(root, stem))
+        {
+            return false;
+        }
+
+        for (int i = graph.Offset[stem]; i < graph.Offset[stem + 1]; i++)
+        {
+            int other = graph.Adjacent[i];
+            if (orbits[other] == orbits[root] && WalkBranch(other, stem))
+            {
+                foreach (int atom in branch)
+                {
+                    Depth[atom] += weight;
+                }
+            }
+        }
+
+        return true;
+    }
+
+    /// <summary>Collects what hangs on the stem through an atom; fails when it comes back or holds a rigid frame.</summary>
+    private bool WalkBranch(int root, int stem)
+    {
+        branch.Clear();
+        branch.Add(root);
         if (graph.DegreeOf(root) == 1)
         {
             return true;
         }
 
-        HashSet<int> seen = [root];
-        Stack<int> open = new([root]);
+        open.Clear();
+        open.Push(root);
+        int own = ++mark;
+        seen[root] = own;
         while (open.TryPop(out int atom))
         {
-            int center = graph.CenterAt[atom] - 1;
-            int axis = graph.AxisAt[atom] - 1;
-            if ((center >= 0 && !IsFlexible(center)) || (axis >= 0 && !IsFlexible(axis)))
-            {
-                return false;
-            }
-
             for (int i = graph.Offset[atom]; i < graph.Offset[atom + 1]; i++)
             {
                 int next = graph.Adjacent[i];
@@ -118,13 +190,35 @@ internal readonly ref struct FlexibleFrames
                         return false;
                     }
                 }
-                else if (seen.Add(next))
+                else if (seen[next] != own)
                 {
+                    seen[next] = own;
+                    branch.Add(next);
                     open.Push(next);
                 }
             }
         }
 
-        return true;
+        return HoldsNoRigidFrame([.. branch]);
+    }
+
+    private bool HoldsNoRigidFrame(ReadOnlySpan<int> atoms)
+    {
+        bool any = false;
+        foreach (int atom in atoms)
+        {
+            int center = graph.CenterAt[atom] - 1;
+            int axis = graph.AxisAt[atom] - 1;
+            any |= (center >= 0 && !IsFlexible(center)) || (axis >= 0 && !IsFlexible(axis));
+        }
+
+        // The frames inside were looked at with the same scratch list.
+        branch.Clear();
+        foreach (int atom in atoms)
+        {
+            branch.Add(atom);
+        }
+
+        return !any;
     }
 }

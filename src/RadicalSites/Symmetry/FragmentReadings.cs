@@ -25,12 +25,12 @@ internal sealed class FragmentReadings
     private int mostReadings;
     private int steps;
 
-    internal FragmentReadings(SymmetryWorkspace workspace, int fragment, int stated, sbyte[] flexible)
+    internal FragmentReadings(SymmetryWorkspace workspace, int fragment, int stated)
     {
         this.workspace = workspace;
         this.fragment = fragment;
         this.stated = stated;
-        this.flexible = flexible;
+        flexible = workspace.Flexible.State;
         graph = workspace.Graph;
     }
 
@@ -40,7 +40,7 @@ internal sealed class FragmentReadings
     internal List<sbyte[]> Solve(int most)
     {
         mostReadings = most;
-        for (int e = 0; e < flexible.Length; e++)
+        for (int e = 0; e < graph.ElementCount; e++)
         {
             if (flexible[e] < 0 && graph.FragmentIndexOf(graph.Focus[e]) == fragment)
             {

@@ -15,24 +15,30 @@ internal static class FrameReadings
     /// <summary>Finds the readings.</summary>
     /// <param name="workspace">Workspace whose graph holds the frames; the stated ones come first.</param>
     /// <param name="stated">Number of frames whose configuration is stated.</param>
-    /// <param name="flexible">Result of <see cref="FlexibleFrames"/>.</param>
     /// <param name="orbits">Constitutional orbit by atom.</param>
-    /// <returns>One or more full arrays of configurations.</returns>
-    internal static List<sbyte[]> Find(SymmetryWorkspace workspace, int stated, sbyte[] flexible, int[] orbits)
+    /// <returns>One or more full arrays of configurations, or null when none needs to be chosen.</returns>
+    internal static List<sbyte[]>? Find(SymmetryWorkspace workspace, int stated, int[] orbits)
     {
         SymmetryGraph graph = workspace.Graph;
-        sbyte[] basis = graph.Configuration.AsSpan(0, graph.ElementCount).ToArray();
-        List<sbyte[]> readings = [basis];
-        bool[] open = new bool[graph.FragmentCount];
-        for (int e = stated; e < flexible.Length; e++)
+        sbyte[] flexible = workspace.Flexible.State;
+        ColorPartition cells = workspace.Constitution;
+        bool[]? open = null;
+        for (int e = stated; e < graph.ElementCount; e++)
         {
             int focus = graph.Focus[e];
-            ColorPartition cells = workspace.Constitution;
             if (flexible[e] < 0 && cells.Length[cells.CellOf[focus]] > 1)
             {
-                open[graph.FragmentIndexOf(focus)] = true;
+                (open ??= new bool[graph.FragmentCount])[graph.FragmentIndexOf(focus)] = true;
             }
         }
+
+        if (open is null)
+        {
+            return null;
+        }
+
+        sbyte[] basis = graph.Configuration.AsSpan(0, graph.ElementCount).ToArray();
+        List<sbyte[]> readings = [basis];
 
         for (int fragment = 0; fragment < open.Length; fragment++)
         {
@@ -49,7 +55,7 @@ internal static class FrameReadings
                 continue;
             }
 
-            List<sbyte[]> own = new FragmentReadings(workspace, fragment, stated, flexible).Solve(MostReadings);
+            List<sbyte[]> own = new FragmentReadings(workspace, fragment, stated).Solve(MostReadings);
             List<sbyte[]> combined = [];
             int count = Math.Max(readings.Count, own.Count);
             for (int r = 0; r < count; r++)

@@ -168,14 +168,17 @@ internal sealed class IsomorphismSearch
                 }
             }
 
+            // Elements with an index beyond the count are set aside at the moment.
             int center = graph.CenterAt[atom] - 1;
-            if (center >= 0 && StereoImage.SignOfCenter(graph, center, Image, configurationOfImage) != 1)
+            if (center >= 0 && center < graph.ElementCount
+                && StereoImage.SignOfCenter(graph, center, Image, configurationOfImage) != 1)
             {
                 return false;
             }
 
             int axis = graph.AxisAt[atom] - 1;
-            if (axis >= 0 && StereoImage.SignOfAxis(graph, axis, Image, configurationOfImage) != 1)
+            if (axis >= 0 && axis < graph.ElementCount
+                && StereoImage.SignOfAxis(graph, axis, Image, configurationOfImage) != 1)
             {
                 return false;
             }

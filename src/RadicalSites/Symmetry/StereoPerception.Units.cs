@@ -63,9 +63,10 @@ public static partial class StereoPerception
         int stated = graph.ElementCount;
         int[] orbits = SymmetryAnalysis.ConstitutionalOrbits(workspace, molecule.AtomCount);
         StereoFrames.AddFree(graph, molecule);
-        sbyte[] flexible = FlexibleFrames.Find(graph, orbits);
+        workspace.Flexible.Find(workspace, orbits);
+        sbyte[] flexible = workspace.Flexible.State;
         SignedForest ties = new(graph.ElementCount + 1);
-        for (int e = 0; e < flexible.Length; e++)
+        for (int e = 0; e < graph.ElementCount; e++)
         {
             if (flexible[e] > 0 || graph.Kind[e] != SymmetryGraph.Center)
             {
@@ -77,7 +78,7 @@ public static partial class StereoPerception
                 ties.TryJoin(e, graph.ElementCount, 1);
             }
 
-            for (int f = Math.Max(e + 1, stated); f < flexible.Length; f++)
+            for (int f = Math.Max(e + 1, stated); f < graph.ElementCount; f++)
             {
                 if (flexible[f] < 0 && graph.Kind[f] == SymmetryGraph.Center
                     && CagePaths.Relation(graph, graph.Focus[e], graph.Focus[f]) is int relation && relation != 0)
@@ -97,7 +98,7 @@ public static partial class StereoPerception
         List<StereoElement[]> result = [];
         List<StereoElement> forced = [];
         int constant = ties.Root(graph.ElementCount, out _);
-        for (int e = stated; e < flexible.Length; e++)
+        for (int e = stated; e < graph.ElementCount; e++)
         {
             if (flexible[e] > 0)
             {

@@ -29,7 +29,8 @@ public sealed partial class SymmetryAnalysis
         StereoFrames.AddFree(graph, molecule);
         if (graph.ElementCount == 0)
         {
-            new TopicitySearch(workspace, molecule, 0).FindHydrogens(hydrogens);
+            workspace.Topicity.BeginPlain(workspace, molecule);
+            workspace.Topicity.FindHydrogens(hydrogens);
         }
         else
         {
@@ -60,18 +61,19 @@ public sealed partial class SymmetryAnalysis
     {
         SymmetryGraph graph = workspace.Graph;
         int n = graph.AtomCount;
-        sbyte[] flexible = FlexibleFrames.Find(graph, constitutional);
-        List<sbyte[]> readings = FrameReadings.Find(workspace, stated, flexible, constitutional);
+        workspace.Flexible.Find(workspace, constitutional);
+        List<sbyte[]>? readings = FrameReadings.Find(workspace, stated, constitutional);
+        TopicitySearch topicity = workspace.Topicity;
         enantiotopic = constitutional;
         homotopic = constitutional;
-        foreach (sbyte[] reading in readings)
+        for (int r = 0; r < (readings?.Count ?? 1); r++)
         {
-            reading.CopyTo(graph.Configuration, 0);
-            TopicitySearch topicity = new(workspace, molecule, stated);
-            topicity.FindOrbits(constitutional);
+            readings?[r].CopyTo(graph.Configuration, 0);
+            topicity.Begin(workspace, molecule, stated, constitutional);
+            topicity.FindOrbits();
             topicity.FindHydrogens(hydrogens);
-            enantiotopic = Meet(enantiotopic, Roots(workspace.MirrorOrbits, n));
-            homotopic = Meet(homotopic, Roots(workspace.ProperOrbits, n));
+            enantiotopic = Meet(enantiotopic, workspace.MirrorOrbits);
+            homotopic = Meet(homotopic, workspace.ProperOrbits);
         }
 
         if (graph.ElementCount > stated
@@ -122,15 +124,28 @@ public sealed partial class SymmetryAnalysis
     }
 
     /// <summary>Classes of atoms that are together in both; the first is the finer of earlier readings.</summary>
-    private static int[] Meet(int[] first, int[] second)
+    private static int[] Meet(int[] first, OrbitForest second)
     {
-        int[] lowest = new int[first.Length];
-        for (int i = 0; i < first.Length; i++)
+        int n = first.Length;
+        bool same = true;
+        for (int i = 0; i < n && same; i++)
+        {
+            same = second.Find(i) == second.Find(first[i]);
+        }
+
+        if (same)
+        {
+            // The second is no finer, as orbits never join what the earlier classes separate.
+            return first;
+        }
+
+        int[] lowest = new int[n];
+        for (int i = 0; i < n; i++)
         {
             int root = i;
-            for (int j = Math.Max(first[i], second[i]); j < i; j++)
+            for (int j = Math.Max(first[i], second.Find(i)); j < i; j++)
             {
-                if (first[j] == first[i] && second[j] == second[i])
+                if (first[j] == first[i] && second.Find(j) == second.Find(i))
                 {
                     root = j;
                     break;

@@ -19,6 +19,8 @@ internal sealed class SymmetryWorkspace
     internal readonly OrbitForest ConstitutionalOrbits = new();
     internal readonly OrbitForest MirrorOrbits = new();
     internal readonly OrbitForest ProperOrbits = new();
+    internal readonly FlexibleFrames Flexible = new();
+    internal readonly TopicitySearch Topicity = new();
     internal sbyte[] MirroredConfiguration = [];
     internal int[] Places = [];
 

@@ -4,54 +4,64 @@ using RadicalSites.Molecules;
 namespace RadicalSites.Symmetry;
 
 /// <summary>Splits constitutional orbits by geometry, and relates the hydrogens on one atom.</summary>
-internal readonly struct TopicitySearch
+internal sealed partial class TopicitySearch
 {
-    private readonly SymmetryWorkspace workspace;
-    private readonly SymmetryGraph graph;
-    private readonly Molecule molecule;
+    private SymmetryWorkspace workspace = null!;
+    private SymmetryGraph graph = null!;
+    private Molecule molecule = null!;
+    private ColorPartition stereo = null!;
+    private int[] constitutional = [];
+    private int stated;
+    private bool isMirrorRefined;
 
-    internal TopicitySearch(SymmetryWorkspace workspace, Molecule molecule, int stated)
+    /// <summary>Prepares for a graph without frames.</summary>
+    internal void BeginPlain(SymmetryWorkspace owner, Molecule subject)
     {
-        this.workspace = workspace;
-        this.molecule = molecule;
-        graph = workspace.Graph;
-        workspace.Stereo.CopyFrom(workspace.Constitution);
-        workspace.Mirrored.CopyFrom(workspace.Constitution);
-        workspace.Stereo.SeparateFoci(graph, stated);
-        workspace.Mirrored.SeparateFoci(graph, stated);
-        workspace.Stereo.Refine(graph, graph.Configuration);
-        graph.Mirror(ref workspace.MirroredConfiguration);
-        workspace.Mirrored.Refine(graph, workspace.MirroredConfiguration);
+        workspace = owner;
+        graph = owner.Graph;
+        molecule = subject;
+        stereo = owner.Constitution;
+    }
+
+    /// <summary>Prepares for a graph with frames whose configurations are all set.</summary>
+    /// <param name="owner">The workspace.</param>
+    /// <param name="subject">The molecule.</param>
+    /// <param name="statedCount">Number of frames, from the first on, that the molecule states.</param>
+    /// <param name="orbits">Constitutional orbit by atom, named by its lowest member.</param>
+    internal void Begin(SymmetryWorkspace owner, Molecule subject, int statedCount, int[] orbits)
+    {
+        BeginPlain(owner, subject);
+        constitutional = orbits;
+        stated = statedCount;
+        isMirrorRefined = false;
+        if (!owner.Constitution.IsDiscrete)
+        {
+            stereo = owner.Stereo;
+            stereo.CopyFrom(owner.Constitution);
+            stereo.SeparateFoci(graph, stated);
+            stereo.Refine(graph, graph.Configuration);
+        }
     }
 
     /// <summary>Fills the orbits of proper operations and those of proper and mirroring ones.</summary>
-    /// <param name="constitutional">Constitutional orbit by atom, named by its lowest member.</param>
-    internal void FindOrbits(ReadOnlySpan<int> constitutional)
+    internal void FindOrbits()
     {
-        int n = constitutional.Length;
+        int n = graph.AtomCount;
         workspace.MirrorOrbits.Start(n);
         workspace.ProperOrbits.Start(n);
         ColorPartition cells = workspace.Constitution;
+        if (cells.IsDiscrete)
+        {
+            return;
+        }
+
         for (int cell = 0; cell < n; cell += cells.Length[cell])
         {
             int end = cell + cells.Length[cell];
             for (int i = cell + 1; i < end; i++)
             {
-                Place(cells, cell, i, constitutional);
+                Place(cells, cell, i);
             }
-        }
-    }
-
-    /// <summary>Relates the hydrogens on each atom; a weaker relation found before stays.</summary>
-    internal void FindHydrogens(Span<Topicity> hydrogens)
-    {
-        ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
-        for (int i = 0; i < atoms.Length; i++)
-        {
-            Topicity found = atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 2 ? OfMethylene(i)
-                : atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 1 ? OfTerminal(i)
-                : Topicity.Homotopic;
-            hydrogens[i] = found > hydrogens[i] ? found : hydrogens[i];
         }
     }
 
@@ -67,7 +77,7 @@ internal readonly struct TopicitySearch
         }
     }
 
-    private void Place(ColorPartition cells, int cell, int index, ReadOnlySpan<int> constitutional)
+    private void Place(ColorPartition cells, int cell, int index)
     {
         OrbitForest mirror = workspace.MirrorOrbits;
         OrbitForest proper = workspace.ProperOrbits;
@@ -86,11 +96,32 @@ internal readonly struct TopicitySearch
             }
         }
 
+        FlexibleFrames frames = workspace.Flexible;
+        MirrorState state = frames.Fragments[graph.FragmentIndexOf(atom)];
+        bool reflects = state == MirrorState.Always && frames.Depth[atom] <= 1
+            && !frames.HasOpenAxis[graph.FragmentIndexOf(atom)];
         for (int i = cell; i < index; i++)
         {
             int other = cells.Members[i];
-            if (constitutional[other] == constitutional[atom]
-                && (mirror.Find(other) == mirror.Find(atom) || TryMirror(other, atom)))
+            if (constitutional[other] != constitutional[atom])
+            {
+                continue;
+            }
+
+            // Without a rigid frame any automorphism can be made to mirror by turning frames over on the spot; only atoms
+            // that two nested frames would move need a closer look.
+            if (reflects)
+            {
+                mirror.Union(other, atom);
+                return;
+            }
+
+            if (state == MirrorState.Never && graph.FragmentIndexOf(other) == graph.FragmentIndexOf(atom))
+            {
+                continue;
+            }
+
+            if (mirror.Find(other) == mirror.Find(atom) || TryMirror(other, atom))
             {
                 return;
             }
@@ -99,12 +130,12 @@ internal readonly struct TopicitySearch
 
     private bool TryProper(int from, int to)
     {
-        if (workspace.Stereo.CellOf[from] != workspace.Stereo.CellOf[to])
+        if (stereo.CellOf[from] != stereo.CellOf[to] || IsHeldPair(from, to))
         {
             return false;
         }
 
-        if (workspace.Probe.TryMap(graph, workspace.Stereo, from, to))
+        if (workspace.Probe.TryMap(graph, stereo, from, to))
         {
             for (int i = 0; i < workspace.Probe.AssignedCount; i++)
             {
@@ -116,7 +147,7 @@ internal readonly struct TopicitySearch
             return true;
         }
 
-        if (!workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Stereo, [from], [to], graph.Configuration))
+        if (!workspace.Isomorphism.TryFind(graph, stereo, stereo, [from], [to], graph.Configuration))
         {
             return false;
         }
@@ -126,10 +157,51 @@ internal readonly struct TopicitySearch
         return true;
     }
 
+    /// <summary>
+    /// Whether the two atoms are the only like ligands of a centre that stays in place, so that exchanging them inverts it.
+    /// </summary>
+    private bool IsHeldPair(int from, int to)
+    {
+        for (int i = graph.Offset[from]; i < graph.Offset[from + 1]; i++)
+        {
+            int focus = graph.Adjacent[i];
+            int e = graph.CenterAt[focus] - 1;
+            if (e < 0 || graph.Kind[e] != SymmetryGraph.Center || stereo.Length[stereo.CellOf[focus]] > 1
+                || graph.WeightBetween(focus, to) == 0)
+            {
+                continue;
+            }
+
+            int like = 0;
+            int others = -2;
+            bool distinct = true;
+            for (int c = 4 * e; c < (4 * e) + 4; c++)
+            {
+                int carrier = graph.Carriers[c];
+                int color = carrier < 0 ? -1 : stereo.CellOf[carrier];
+                if (color == stereo.CellOf[from])
+                {
+                    like++;
+                }
+                else
+                {
+                    distinct &= color != others;
+                    others = color;
+                }
+            }
+
+            return like == 2 && distinct;
+        }
+
+        return false;
+    }
+
     private bool TryMirror(int from, int to)
     {
-        if (workspace.Stereo.CellOf[from] != workspace.Mirrored.CellOf[to]
-            || !workspace.Isomorphism.TryFind(graph, workspace.Stereo, workspace.Mirrored, [from], [to], workspace.MirroredConfiguration))
+        RefineMirrored();
+        if (stereo.CellOf[from] != workspace.Mirrored.CellOf[to]
+            || !workspace.Isomorphism.TryFind(
+                graph, stereo, workspace.Mirrored, [from], [to], workspace.MirroredConfiguration))
         {
             return false;
         }
@@ -138,57 +210,17 @@ internal readonly struct TopicitySearch
         return true;
     }
 
-    private Topicity OfMethylene(int atom)
+    private void RefineMirrored()
     {
-        int at = graph.Offset[atom];
-        int first = graph.Adjacent[at];
-        int second = graph.Adjacent[at + 1];
-        int[] cellOf = workspace.Stereo.CellOf;
-        if (cellOf[first] == cellOf[second]
-            && workspace.Isomorphism.TryFind(
-                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], graph.Configuration))
+        if (isMirrorRefined)
         {
-            return Topicity.Homotopic;
+            return;
         }
 
-        return graph.ElementCount == 0 || workspace.Isomorphism.TryFind(
-            graph, workspace.Stereo, workspace.Mirrored, [atom, first, second], [atom, first, second], workspace.MirroredConfiguration)
-            ? Topicity.Enantiotopic
-            : Topicity.Diastereotopic;
-    }
-
-    /// <summary>A terminal CH2: free to turn on a single bond, else related through the two ligands of its partner.</summary>
-    private Topicity OfTerminal(int atom)
-    {
-        int at = graph.Offset[atom];
-        if (graph.Weight[at] == SymmetryGraph.SingleWeight)
-        {
-            return Topicity.Homotopic;
-        }
-
-        int partner = graph.Adjacent[at];
-        int end = graph.Offset[partner + 1];
-        int first = -1;
-        int second = -1;
-        for (int i = graph.Offset[partner]; i < end; i++)
-        {
-            int ligand = graph.Adjacent[i];
-            if (ligand != atom)
-            {
-                second = first;
-                first = ligand;
-            }
-        }
-
-        if (first < 0)
-        {
-            return Topicity.Homotopic;
-        }
-
-        return second >= 0 && workspace.Stereo.CellOf[first] == workspace.Stereo.CellOf[second]
-            && workspace.Isomorphism.TryFind(
-                graph, workspace.Stereo, workspace.Stereo, [atom, first, second], [atom, second, first], graph.Configuration)
-            ? Topicity.Homotopic
-            : Topicity.Diastereotopic;
+        isMirrorRefined = true;
+        graph.Mirror(ref workspace.MirroredConfiguration);
+        workspace.Mirrored.CopyFrom(workspace.Constitution);
+        workspace.Mirrored.SeparateFoci(graph, stated);
+        workspace.Mirrored.Refine(graph, workspace.MirroredConfiguration);
     }
 }

@@ -1,0 +1,91 @@
+using System;
+using RadicalSites.Molecules;
+
+namespace RadicalSites.Symmetry;
+
+internal sealed partial class TopicitySearch
+{
+    /// <summary>Relates the hydrogens on each atom; a weaker relation found before stays.</summary>
+    internal void FindHydrogens(Span<Topicity> hydrogens)
+    {
+        ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
+        for (int i = 0; i < atoms.Length; i++)
+        {
+            Topicity found = atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 2 ? OfMethylene(i)
+                : atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 1 ? OfTerminal(i)
+                : Topicity.Homotopic;
+            hydrogens[i] = found > hydrogens[i] ? found : hydrogens[i];
+        }
+    }
+
+    private Topicity OfMethylene(int atom)
+    {
+        int at = graph.Offset[atom];
+        int first = graph.Adjacent[at];
+        int second = graph.Adjacent[at + 1];
+        int[] cellOf = stereo.CellOf;
+        if (cellOf[first] == cellOf[second]
+            && workspace.Isomorphism.TryFind(
+                graph, stereo, stereo, [atom, first, second], [atom, second, first], graph.Configuration))
+        {
+            return Topicity.Homotopic;
+        }
+
+        if (graph.ElementCount == 0)
+        {
+            return Topicity.Enantiotopic;
+        }
+
+        MirrorState state = workspace.Flexible.Fragments[graph.FragmentIndexOf(atom)];
+        if (state == MirrorState.Never)
+        {
+            return Topicity.Diastereotopic;
+        }
+
+        if (state == MirrorState.Always && workspace.Flexible.Depth[atom] == 0)
+        {
+            return Topicity.Enantiotopic;
+        }
+
+        RefineMirrored();
+        return workspace.Isomorphism.TryFind(
+            graph, stereo, workspace.Mirrored, [atom, first, second], [atom, first, second], workspace.MirroredConfiguration)
+            ? Topicity.Enantiotopic
+            : Topicity.Diastereotopic;
+    }
+
+    /// <summary>A terminal CH2: free to turn on a single bond, else related through the two ligands of its partner.</summary>
+    private Topicity OfTerminal(int atom)
+    {
+        int at = graph.Offset[atom];
+        if (graph.Weight[at] == SymmetryGraph.SingleWeight)
+        {
+            return Topicity.Homotopic;
+        }
+
+        int partner = graph.Adjacent[at];
+        int end = graph.Offset[partner + 1];
+        int first = -1;
+        int second = -1;
+        for (int i = graph.Offset[partner]; i < end; i++)
+        {
+            int ligand = graph.Adjacent[i];
+            if (ligand != atom)
+            {
+                second = first;
+                first = ligand;
+            }
+        }
+
+        if (first < 0)
+        {
+            return Topicity.Homotopic;
+        }
+
+        return second >= 0 && stereo.CellOf[first] == stereo.CellOf[second]
+            && workspace.Isomorphism.TryFind(
+                graph, stereo, stereo, [atom, first, second], [atom, second, first], graph.Configuration)
+            ? Topicity.Homotopic
+            : Topicity.Diastereotopic;
+    }
+}
