@@ -21,8 +21,8 @@ public static class CanonicalSmiles
         ArgumentNullException.ThrowIfNull(molecule);
         int[] ranks = ArrayPool<int>.Shared.Rent(Math.Max(1, molecule.AtomCount));
         Span<int> used = ranks.AsSpan(0, molecule.AtomCount);
-        CanonicalRanking.Fill(molecule, CanonicalRankingOptions.Default, used);
-        string text = SmilesWriter.Write(molecule, used);
+        CanonicalRanking.Fill(molecule, CanonicalRankingOptions.Default, used, out Molecule real);
+        string text = SmilesWriter.Write(real, used);
         ArrayPool<int>.Shared.Return(ranks);
         return text;
     }

@@ -107,6 +107,11 @@ internal static partial class AromaticityModel
 
     private static int[]? AsCycle(HashSet<(int Low, int High)> bonds)
     {
+        if (bonds.Count == 0)
+        {
+            return null;
+        }
+
         var next = new Dictionary<int, (int A, int B)>();
         foreach ((int low, int high) in bonds)
         {

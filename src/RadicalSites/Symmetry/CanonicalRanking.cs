@@ -50,11 +50,15 @@ public sealed class CanonicalRanking
     }
 
     /// <summary>Writes the ranks to a span; returns whether the order is proven canonical.</summary>
-    internal static bool Fill(Molecule molecule, CanonicalRankingOptions options, Span<int> ranks)
+    internal static bool Fill(Molecule molecule, CanonicalRankingOptions options, Span<int> ranks) =>
+        Fill(molecule, options, ranks, out _);
+
+    /// <summary>As above; also gives the molecule without the stereo elements that mean nothing.</summary>
+    internal static bool Fill(Molecule molecule, CanonicalRankingOptions options, Span<int> ranks, out Molecule real)
     {
         SymmetryWorkspace workspace = SymmetryWorkspace.Own;
         SymmetryGraph graph = workspace.Graph;
-        Load(workspace, molecule, options);
+        real = Load(workspace, molecule, options);
         if (graph.FragmentCount > 1)
         {
             return FillFragments(workspace, options, ranks);
@@ -100,20 +104,20 @@ public sealed class CanonicalRanking
         return whole;
     }
 
-    private static void Load(SymmetryWorkspace workspace, Molecule molecule, CanonicalRankingOptions options)
+    private static Molecule Load(SymmetryWorkspace workspace, Molecule molecule, CanonicalRankingOptions options)
     {
         SymmetryGraph graph = workspace.Graph;
         if (options.IncludeStereo && molecule.StereoSpan.Length > 0)
         {
             workspace.Isomorphism.Begin(options.SearchLimit);
-            StereoPerception.Prepare(workspace, molecule, options.IncludeAtomClasses);
+            Molecule real = StereoPerception.Prepare(workspace, molecule, options.IncludeAtomClasses);
             graph.MarkElements();
+            return real;
         }
-        else
-        {
-            graph.Load(molecule, options.IncludeAtomClasses);
-            graph.FindFragments();
-        }
+
+        graph.Load(molecule, options.IncludeAtomClasses);
+        graph.FindFragments();
+        return molecule;
     }
 
     private static bool FillFragments(SymmetryWorkspace workspace, CanonicalRankingOptions options, Span<int> ranks)

@@ -48,10 +48,10 @@ internal static class FrameReadings
                 continue;
             }
 
-            int model = graph.FragmentIndexOf(orbits[first]);
-            if (model != fragment)
+            int like = FirstLike(workspace, orbits, first);
+            if (graph.FragmentIndexOf(like) != fragment)
             {
-                CopyFragment(workspace, stated, orbits[first], first, readings);
+                CopyFragment(workspace, stated, like, first, readings);
                 continue;
             }
 
@@ -77,6 +77,25 @@ internal static class FrameReadings
         }
 
         return readings;
+    }
+
+    /// <summary>The equivalent atom that lies in the first fragment.</summary>
+    private static int FirstLike(SymmetryWorkspace workspace, int[] orbits, int atom)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        ColorPartition cells = workspace.Constitution;
+        int cell = cells.CellOf[atom];
+        int best = atom;
+        for (int i = cell; i < cell + cells.Length[cell]; i++)
+        {
+            int other = cells.Members[i];
+            if (orbits[other] == orbits[atom] && graph.FragmentIndexOf(other) < graph.FragmentIndexOf(best))
+            {
+                best = other;
+            }
+        }
+
+        return best;
     }
 
     /// <summary>Reads a fragment like the first one that is equal to it.</summary>

@@ -269,7 +269,7 @@ internal sealed partial class SmilesOutput
         int carrierCount = element.Carriers.Count;
         Span<int> order = stackalloc int[8];
         int filled = element.Kind == StereoKind.Allene
-            ? AlleneOrder(element, order)
+            ? carrierCount
             : PrintedOrder(atom, element, order);
         if (filled != carrierCount)
         {
@@ -279,9 +279,12 @@ internal sealed partial class SmilesOutput
         switch (element.Kind)
         {
             case StereoKind.Tetrahedral:
-            case StereoKind.Allene:
                 bool odd = IsOdd(element.CarrierSpan, order[..filled]);
                 return (element.Configuration == 1) != odd ? "@" : "@@";
+            case StereoKind.Allene:
+                // Which end is printed first does not matter: exchanging the ends is an even permutation.
+                bool turned = IsEndTurned(element, 0) != IsEndTurned(element, 2);
+                return (element.Configuration == 1) != turned ? "@" : "@@";
             case StereoKind.SquarePlanar:
                 return SquarePlanarMarks[CoordinationCodes.Reorder(element, order[..filled]) - 1];
             case StereoKind.TrigonalBipyramidal:
@@ -325,17 +328,6 @@ internal sealed partial class SmilesOutput
         }
 
         return filled;
-    }
-
-    private int AlleneOrder(StereoElement element, Span<int> order)
-    {
-        // The carriers of the end printed first come first; within an end: atom before, hydrogen, ring bonds, branches.
-        int leftEnd = EndOf(element, 0);
-        int rightEnd = EndOf(element, 2);
-        int first = visited[leftEnd] < visited[rightEnd] ? leftEnd : rightEnd;
-        int second = first == leftEnd ? rightEnd : leftEnd;
-        int filled = EndOrder(element, first, first == leftEnd ? 0 : 2, order, 0);
-        return EndOrder(element, second, second == leftEnd ? 0 : 2, order, filled);
     }
 
     private int EndOf(StereoElement element, int slot)
@@ -385,14 +377,11 @@ internal sealed partial class SmilesOutput
         return false;
     }
 
-    private int EndOrder(StereoElement element, int end, int slot, Span<int> order, int filled)
+    // Whether the text shows the two ligands of an end (atom before, hydrogen, ring bonds, branches) the other way round.
+    private bool IsEndTurned(StereoElement element, int slot)
     {
-        int a = element.CarrierSpan[slot];
-        int b = element.CarrierSpan[slot + 1];
-        bool swap = PlaceAt(end, b) < PlaceAt(end, a);
-        order[filled++] = swap ? b : a;
-        order[filled++] = swap ? a : b;
-        return filled;
+        int end = EndOf(element, slot);
+        return PlaceAt(end, element.CarrierSpan[slot + 1]) < PlaceAt(end, element.CarrierSpan[slot]);
     }
 
     private int PlaceAt(int end, int carrier)
