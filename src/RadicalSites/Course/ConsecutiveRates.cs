@@ -1,7 +1,9 @@
 using System;
 using System.Collections.Generic;
-using System.Globalization;
-using System.IO;
+using RadicalSites.Canonical;
+using RadicalSites.Diagnostics;
+using RadicalSites.Formats.Smiles;
+using RadicalSites.Molecules;
 
 namespace RadicalSites.Course;
 
@@ -12,10 +14,13 @@ namespace RadicalSites.Course;
 /// </remarks>
 internal sealed class ConsecutiveRates
 {
-    private const string Header =
-        "id,carrier,substrate,reference,ratio,relative_sigma,temperature_K,kind,source,locator,checked,note";
+    private static readonly string[] Columns =
+    [
+        "id", "carrier", "substrate", "reference", "ratio", "relative_sigma", "temperature_K", "kind", "source",
+        "locator", "checked", "note",
+    ];
 
-    private static readonly Lazy<ConsecutiveRates> Shipped = new(ReadShipped);
+    private static readonly Lazy<ConsecutiveRates> Shipped = new(static () => Read(CsvTable.EmbeddedText("consecutive_rates.csv")));
     private readonly List<Row> rows;
 
     private ConsecutiveRates(List<Row> rows) => this.rows = rows;
@@ -39,37 +44,23 @@ internal sealed class ConsecutiveRates
     }
 
     /// <summary>Reads a table strictly.</summary>
-    /// <param name="reader">The text.</param>
-    /// <param name="canonicalise">Brings a SMILES to the canonical form of the library.</param>
-    /// <exception cref="InvalidDataException">A header, field count, number or id is wrong; the message names the line.</exception>
-    internal static ConsecutiveRates Read(TextReader reader, Func<string, string> canonicalise)
+    /// <param name="text">The text of the table.</param>
+    /// <exception cref="TableFormatException">A column, number, id or SMILES is wrong; the message names the place.</exception>
+    internal static ConsecutiveRates Read(string text)
     {
         var rows = new List<Row>();
         var ids = new HashSet<string>(StringComparer.Ordinal);
-        bool header = false;
-        for (int line = 1; reader.ReadLine() is { } text; line++)
+        foreach (CsvRow row in CsvTable.Read("consecutive_rates.csv", text, Columns, []).Rows)
         {
-            if (text.Length == 0 || text[0] == '#')
+            if (!ids.Add(row.Required("id")))
             {
-                continue;
+                throw row.Error("id", "the id occurs twice.");
             }
 
-            if (!header)
-            {
-                header = text == Header ? true : throw Wrong(line, "the header row is not the expected one");
-                continue;
-            }
-
-            string[] fields = text.Split(',', 12);
-            if (fields.Length != 12 || !ids.Add(fields[0]))
-            {
-                throw Wrong(line, "fields are missing or the id occurs twice");
-            }
-
+            row.Number("relative_sigma", 0.001, 2);
             rows.Add(new Row(
-                fields[0], fields[1], canonicalise(fields[2]), canonicalise(fields[3]), Positive(fields[4], line),
-                Positive(fields[6], line), fields[8]));
-            Positive(fields[5], line);
+                row.Required("id"), row.Required("carrier"), Canonical(row, "substrate"), Canonical(row, "reference"),
+                row.Number("ratio", 1e-9, 1e9), row.Number("temperature_K", 100, 2000), row.Required("source")));
         }
 
         return new ConsecutiveRates(rows);
@@ -137,23 +128,10 @@ internal sealed class ConsecutiveRates
         return cold.Ratio * Math.Exp(slope * ((1 / kelvin) - (1 / cold.Kelvin)));
     }
 
-    private static double Positive(string text, int line) =>
-        double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double value)
-        && value > 0 && double.IsFinite(value)
-            ? value
-            : throw Wrong(line, $"'{text}' is not a positive number");
-
-    private static InvalidDataException Wrong(int line, string what) =>
-        new(string.Create(CultureInfo.InvariantCulture, $"consecutive_rates.csv, line {line}: {what}."));
-
-    private static ConsecutiveRates ReadShipped()
-    {
-        using Stream stream = typeof(ConsecutiveRates).Assembly
-            .GetManifestResourceStream("RadicalSites.Data.consecutive_rates.csv")
-            ?? throw new InvalidDataException("The embedded table consecutive_rates.csv is missing.");
-        using var reader = new StreamReader(stream);
-        return Read(reader, static smiles => Products.ProductIdentity.SmilesOf(Formats.Smiles.SmilesReader.Parse(smiles)));
-    }
+    private static string Canonical(CsvRow row, string column) =>
+        SmilesReader.TryParse(row.Required(column), out Molecule? molecule, out FormatProblem? problem)
+            ? CanonicalSmiles.Write(molecule)
+            : throw row.Error(column, problem.Message);
 
     private sealed record Row(
         string Id, string Carrier, string Substrate, string Reference, double Ratio, double Kelvin, string Source);

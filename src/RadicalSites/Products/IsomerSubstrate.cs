@@ -83,10 +83,8 @@ internal sealed class IsomerSubstrate
             map[i] = i < Molecule.AtomCount ? i : -1;
         }
 
-        string smiles = ProductIdentity.SmilesOf(product);
-        lost = product.StereoElements.Count < Molecule.StereoElements.Count
-            || (Molecule.StereoElements.Count > 0
-                && StereoPerception.WithoutPhantoms(product).StereoElements.Count < Molecule.StereoElements.Count);
+        string smiles = ProductIdentity.SmilesOf(ref product);
+        lost = product.StereoElements.Count < Molecule.StereoElements.Count;
         return new IsomerProduct
         {
             Number = number,

@@ -1,4 +1,4 @@
-using RadicalSites.Formats.Smiles;
+using RadicalSites.Canonical;
 using RadicalSites.Molecules;
 using RadicalSites.Symmetry;
 
@@ -7,9 +7,18 @@ namespace RadicalSites.Products;
 /// <summary>The text that makes two products one.</summary>
 internal static class ProductIdentity
 {
-    internal static string SmilesOf(Molecule molecule)
+    /// <summary>Canonical SMILES without stereo marks that mean nothing.</summary>
+    internal static string SmilesOf(Molecule molecule) => CanonicalSmiles.Write(
+        molecule.StereoElements.Count == 0 ? molecule : StereoPerception.WithoutPhantoms(molecule));
+
+    /// <summary>As <see cref="SmilesOf(Molecule)"/>; the molecule itself loses the marks too.</summary>
+    internal static string SmilesOf(ref Molecule molecule)
     {
-        Molecule real = StereoPerception.WithoutPhantoms(molecule);
-        return SmilesWriter.Write(real, CanonicalRanking.Rank(real).RankSpan);
+        if (molecule.StereoElements.Count > 0)
+        {
+            molecule = StereoPerception.WithoutPhantoms(molecule);
+        }
+
+        return CanonicalSmiles.Write(molecule);
     }
 }

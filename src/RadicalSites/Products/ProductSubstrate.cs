@@ -34,7 +34,7 @@ internal sealed class ProductSubstrate
     internal Molecule ReplaceAt(Site site, int halogen, out string smiles, out bool hasMirrorImage)
     {
         Molecule product = ReplaceAt(site, site.Carbons[0], halogen);
-        smiles = ProductIdentity.SmilesOf(product);
+        smiles = ProductIdentity.SmilesOf(ref product);
         hasMirrorImage = false;
         if (stereo.Length == 0 || site.Carbons.Count == 1 || analysis.Symmetry is not { } symmetry)
         {
@@ -52,7 +52,7 @@ internal sealed class ProductSubstrate
 
             hasMirrorImage = true;
             Molecule other = ReplaceAt(site, carbon, halogen);
-            string otherSmiles = ProductIdentity.SmilesOf(other);
+            string otherSmiles = ProductIdentity.SmilesOf(ref other);
             if (string.CompareOrdinal(otherSmiles, smiles) < 0)
             {
                 (product, smiles) = (other, otherSmiles);
@@ -68,7 +68,7 @@ internal sealed class ProductSubstrate
     internal Molecule Transpose(int[] path, int halogen, out string smiles)
     {
         Molecule product = Transposition.Build(molecule, path, halogen, stereo);
-        smiles = ProductIdentity.SmilesOf(product);
+        smiles = ProductIdentity.SmilesOf(ref product);
         return product;
     }
 
@@ -97,7 +97,7 @@ internal sealed class ProductSubstrate
         }
 
         // Only a halogen of the same kind elsewhere can make two ligands of a centre alike.
-        return ContainsHalogen(halogen) && StereoUnits.Meaningful(product).Length < stereo.Length
+        return ContainsHalogen(halogen) && product.StereoElements.Count < stereo.Length
             ? StereoOutcome.Lost
             : StereoOutcome.Retained;
     }
@@ -106,7 +106,7 @@ internal sealed class ProductSubstrate
     internal StereoOutcome TransposedOutcome(Molecule product)
     {
         int open = StereoUnits.CountOpen(product, out int openCentres);
-        int kept = StereoUnits.Meaningful(product).Length;
+        int kept = product.StereoElements.Count;
         if (open == 1 && openCentres == 1 && !StereoUnits.HasStatedCentre(product))
         {
             return StereoOutcome.Racemic;
