@@ -12,10 +12,12 @@ namespace RadicalSites.Products;
 internal sealed class IsomerSubstrate
 {
     private readonly int[] rigid;
+    private readonly int[]? origins;
 
-    private IsomerSubstrate(Molecule molecule, int[] carbons, int[] rigid, int hydrogens)
+    private IsomerSubstrate(Molecule molecule, int[]? origins, int[] carbons, int[] rigid, int hydrogens)
     {
         this.rigid = rigid;
+        this.origins = origins;
         Molecule = molecule;
         Carbons = carbons;
         HydrogenCount = hydrogens;
@@ -32,7 +34,8 @@ internal sealed class IsomerSubstrate
 
     internal static IsomerSubstrate Prepare(Molecule molecule, bool withStereo)
     {
-        Molecule prepared = withStereo ? StereoPerception.WithoutPhantoms(molecule) : WithoutStereo(molecule);
+        Molecule folded = LabelledHydrogens.Fold(molecule, out int[]? origins);
+        Molecule prepared = withStereo ? StereoPerception.WithoutPhantoms(folded) : folded.WithStereo([]);
         CanonicalRanking ranking = CanonicalRanking.Rank(prepared);
         var carbons = new List<int>();
         int hydrogens = 0;
@@ -53,7 +56,7 @@ internal sealed class IsomerSubstrate
             rigid = [.. carbons.FindAll(atom => prepared.AtomSpan[atom].IsInRing && RingStrain.HoldsShape(rings, atom))];
         }
 
-        return new IsomerSubstrate(prepared, [.. carbons], rigid, hydrogens);
+        return new IsomerSubstrate(prepared, origins, [.. carbons], rigid, hydrogens);
     }
 
     /// <summary>Builds the product of one pattern.</summary>
@@ -80,7 +83,7 @@ internal sealed class IsomerSubstrate
         int[] map = new int[product.AtomCount];
         for (int i = 0; i < map.Length; i++)
         {
-            map[i] = i < Molecule.AtomCount ? i : -1;
+            map[i] = i >= Molecule.AtomCount ? -1 : origins is null ? i : origins[i];
         }
 
         string smiles = ProductIdentity.SmilesOf(ref product);
@@ -91,16 +94,11 @@ internal sealed class IsomerSubstrate
             CanonicalSmiles = smiles,
             Molecule = product,
             SubstrateAtoms = map,
-            HalogenCarbons = positions,
+            HalogenCarbons = origins is null ? positions : Array.ConvertAll(positions, carbon => origins[carbon]),
             Degeneracy = degeneracy,
             Stereoisomers = options.Stereo == ProductStereoMode.Expand
                 ? StereoUnits.Expand(product, withMirrorImages: false, options.StereoisomerLimit, null)
                 : null,
         };
     }
-
-    private static Molecule WithoutStereo(Molecule molecule) =>
-        molecule.StereoElements.Count == 0 ? molecule : new Molecule(
-            molecule.AtomSpan.ToArray(), molecule.BondSpan.ToArray(), molecule.NeighborOffsets.ToArray(),
-            molecule.NeighborSpan.ToArray(), []);
 }

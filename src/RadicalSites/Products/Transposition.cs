@@ -61,7 +61,8 @@ internal static class Transposition
             ?? throw new InvalidOperationException(problem!.Message);
     }
 
-    private static BuilderAtom Describe(Atom atom, int element, int hydrogens) => new()
+    /// <summary>An atom for a draft, with its hydrogens stated.</summary>
+    internal static BuilderAtom Describe(Atom atom, int element, int hydrogens) => new()
     {
         Element = (byte)element,
         Charge = (sbyte)atom.FormalCharge,

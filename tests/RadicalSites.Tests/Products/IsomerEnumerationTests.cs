@@ -126,6 +126,18 @@ public class IsomerEnumerationTests
         Assert.Contains(ProductIdentity.SmilesOf(SmilesReader.Parse("ClC[C@@H](O)[C@H](O)C")), products.Select(static one => one.CanonicalSmiles));
     }
 
+    [Theory]
+    [InlineData("C([1H])([1H])([1H])C")]
+    [InlineData("[CH2]([H:3])C")]
+    public void Enumerate_labelled_protium_counts_as_hydrogen(string smiles)
+    {
+        IsomerProduct product = IsomerEnumeration.Of(SmilesReader.Parse(smiles), new IsomerOptions()).Enumerate().Single();
+
+        Assert.Equal(ProductIdentity.SmilesOf(SmilesReader.Parse("CCCl")), product.CanonicalSmiles);
+        Assert.Equal(6, product.Degeneracy);
+        Assert.Contains(product.HalogenCarbons.Single(), product.SubstrateAtoms);
+    }
+
     [Fact]
     public void Of_no_site_says_so()
     {
