@@ -33,6 +33,8 @@ public static partial class ProblemCatalogue
                 General.Entries,
                 Smiles.Entries,
                 Chemistry.Entries,
+                Thermochemistry.Entries,
+                Selectivity.Entries,
                 Interference.Entries,
                 Heat.Entries,
                 Products.Entries,

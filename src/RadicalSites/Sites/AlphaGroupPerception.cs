@@ -33,6 +33,9 @@ internal static partial class AlphaGroupPerception
         return all is not null ? all.ToArray() : first is not null ? [first] : [];
     }
 
+    /// <summary>Kind of the group that an atom is for a carbon it is bonded to; null for hydrogen and plain carbon.</summary>
+    internal static AlphaGroupKind? KindOf(Molecule molecule, int carbon, int atom) => Classify(molecule, carbon, atom)?.Kind;
+
     private static AlphaGroup? Classify(Molecule molecule, int carbon, int atom) =>
         molecule.AtomSpan[atom].AtomicNumber switch
         {

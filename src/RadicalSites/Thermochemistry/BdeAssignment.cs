@@ -20,4 +20,15 @@ public sealed record BdeAssignment
 
     /// <summary>The rows used, strongest first; empty when there is no value.</summary>
     public required IReadOnlyList<BdeEvidence> Evidence { get; init; }
+
+    /// <summary>Why there is no value, in words; <see langword="null"/> when there is one.</summary>
+    public string? Reason { get; init; }
+
+    /// <summary>Whether a row of the evidence is an analogy rather than a class with published members.</summary>
+    public bool IsAnalogy { get; init; }
+
+    /// <summary>
+    /// Id of the row whose error is common to every site that rests on it: between two such sites it cancels.
+    /// </summary>
+    public string CommonErrorRow => Evidence.Count == 0 ? "" : Evidence[0].Entry;
 }
