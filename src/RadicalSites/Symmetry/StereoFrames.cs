@@ -68,11 +68,35 @@ internal static class StereoFrames
             6 or 14 or 32 or 50 => ligands == 4 && doubles == 0 && atom.FormalCharge == 0,
             5 => degree == 4 && doubles == 0 && atom.FormalCharge == -1,
             7 => doubles == 0 && ((degree == 4 && atom.FormalCharge == 1) || (ligands == 3 && graph.IsHeldByRings(index))),
+            15 or 33 when HasMobileHydrogen(graph, atoms, index) => false,
+            16 or 34 or 52 when HasMobileHydrogen(graph, atoms, index) => false,
             15 or 33 => (ligands == 4 && doubles <= 1) || (ligands == 3 && doubles == 0 && atom.FormalCharge == 0),
             16 or 34 or 52 => atom.HydrogenCount == 0
                 && (degree == 4 ? doubles is 0 or 2 : atom.FormalCharge is 0 or 1 && doubles <= 1),
             _ => false,
         };
+    }
+
+    /// <summary>Whether the double bond and the hydrogen (or charge) of an acid can trade places, as in P(=O)OH.</summary>
+    private static bool HasMobileHydrogen(SymmetryGraph graph, ReadOnlySpan<Atom> atoms, int index)
+    {
+        int doubly = 0;
+        int acidic = 0;
+        for (int i = graph.Offset[index]; i < graph.Offset[index + 1]; i++)
+        {
+            int other = graph.Adjacent[i];
+            Atom atom = atoms[other];
+            if (graph.DegreeOf(other) != 1 || atom.AtomicNumber is not (8 or 16 or 34))
+            {
+                continue;
+            }
+
+            int bit = 1 << (atom.AtomicNumber / 8);
+            doubly |= graph.Weight[i] == SymmetryGraph.DoubleWeight ? bit : 0;
+            acidic |= graph.Weight[i] == SymmetryGraph.SingleWeight && (atom.HydrogenCount > 0 || atom.FormalCharge < 0) ? bit : 0;
+        }
+
+        return (doubly & acidic) != 0;
     }
 
     /// <summary>Largest number of like terminal neighbours; from three on they take up any exchange among the ligands.</summary>
@@ -181,7 +205,7 @@ internal static class StereoFrames
                 continue;
             }
 
-            if (graph.Weight[i] != SymmetryGraph.SingleWeight)
+            if (graph.Weight[i] is not (SymmetryGraph.SingleWeight or SymmetryGraph.AromaticWeight))
             {
                 return -1;
             }

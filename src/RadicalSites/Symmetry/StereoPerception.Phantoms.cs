@@ -8,7 +8,7 @@ public static partial class StereoPerception
 {
     /// <summary>Finds the stated elements that turn over, alone or with their cage, without changing the molecule.</summary>
     private static void FindSymmetryPhantoms(
-        SymmetryWorkspace workspace, ReadOnlySpan<StereoElement> stated, ref bool[]? phantom)
+        SymmetryWorkspace workspace, Molecule molecule, ReadOnlySpan<StereoElement> stated, ref bool[]? phantom)
     {
         SymmetryGraph graph = workspace.Graph;
         ColorPartition cells = workspace.Constitution;
@@ -23,6 +23,12 @@ public static partial class StereoPerception
             }
 
             e++;
+            if (IsCagedNitrogen(workspace, molecule, e))
+            {
+                (phantom ??= new bool[stated.Length])[i] = true;
+                continue;
+            }
+
             bool resolved = graph.ResolvedSign(e, cells.CellOf, graph.Configuration) != 0;
             if (resolved && cells.Length[cells.CellOf[graph.Focus[e]]] == 1)
             {
@@ -50,6 +56,32 @@ public static partial class StereoPerception
         {
             FindCagePhantoms(workspace, symmetric, stated.Length, ref phantom);
         }
+    }
+
+    /// <summary>
+    /// Whether an element sits on a bridgehead nitrogen whose cage sets it by a stated centre of another element, so that
+    /// its mark adds nothing.
+    /// </summary>
+    private static bool IsCagedNitrogen(SymmetryWorkspace workspace, Molecule molecule, int element)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        int focus = graph.Focus[element];
+        if (graph.Kind[element] != SymmetryGraph.Center || graph.DegreeOf(focus) != 3
+            || molecule.AtomSpan[focus].AtomicNumber != 7)
+        {
+            return false;
+        }
+
+        for (int other = 0; other < graph.ElementCount; other++)
+        {
+            if (graph.Kind[other] == SymmetryGraph.Center && molecule.AtomSpan[graph.Focus[other]].AtomicNumber != 7
+                && CagePaths.Relation(graph, focus, graph.Focus[other]) != 0)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     private static void FindCagePhantoms(

@@ -60,7 +60,7 @@ public static partial class StereoPerception
             }
         }
 
-        FindSymmetryPhantoms(workspace, stated, ref phantom);
+        FindSymmetryPhantoms(workspace, molecule, stated, ref phantom);
         if (phantom is null)
         {
             return molecule;

@@ -10,7 +10,7 @@ internal sealed partial class SymmetryGraph
     /// <summary>Weights are summed over bonds, so each class of bond has its own bit field.</summary>
     internal const int SingleWeight = 1;
 
-    private const int AromaticWeight = 1 << 8;
+    internal const int AromaticWeight = 1 << 8;
     internal const int DoubleWeight = 1 << 16;
     private const int TripleWeight = 1 << 22;
     private const int QuadrupleWeight = 1 << 27;
