@@ -28,14 +28,15 @@ internal sealed partial class SmilesParse
             }
         }
 
+        int[]? ends = null;
         for (int i = 0; i < directionCount; i++)
         {
             ref BuilderBond bond = ref draft.Bonds[directions[i].Bond];
             bool up = directions[i].Up;
 
             // Begin/End with / : End lies above Begin.
-            if (!Place(up ? upper : lower, partner, bond.Begin, bond.End, bond.Position)
-                || !Place(up ? lower : upper, partner, bond.End, bond.Begin, bond.Position))
+            if (!Place(up ? upper : lower, partner, bond.Begin, bond.End, bond.Position, ref ends)
+                || !Place(up ? lower : upper, partner, bond.End, bond.Begin, bond.Position, ref ends))
             {
                 return false;
             }
@@ -85,7 +86,7 @@ internal sealed partial class SmilesParse
         }
     }
 
-    private bool Place(Span<int> side, Span<int> partner, int atom, int carrier, int position)
+    private bool Place(Span<int> side, Span<int> partner, int atom, int carrier, int position, ref int[]? ends)
     {
         if (partner[atom] < 0)
         {
@@ -94,10 +95,24 @@ internal sealed partial class SmilesParse
 
         if (side[atom] >= 0)
         {
-            return Fail(Entry.DirectionConflict, position);
+            // At a carbonyl both neighbours may carry marks that belong to the double bonds beyond them.
+            ends ??= CountEnds();
+            return ends[partner[atom]] == 1 || Fail(Entry.DirectionConflict, position);
         }
 
         side[atom] = carrier;
         return true;
+    }
+
+    private int[] CountEnds()
+    {
+        int[] counts = new int[draft.AtomCount];
+        for (int i = 0; i < draft.BondCount; i++)
+        {
+            counts[draft.Bonds[i].Begin]++;
+            counts[draft.Bonds[i].End]++;
+        }
+
+        return counts;
     }
 }
