@@ -37,10 +37,10 @@ internal static class CourseSolver
 
             exposure = found.Value;
             state = propagator.Advance(start, exposure);
-            points.Add(Describe(network, options, halogens, state, exposure, i == 0 ? 0 : target));
+            points.Add(Describe(network, halogens, state, exposure, i == 0 ? 0 : target));
         }
 
-        return (points, FindBestMono(network, options, halogens, propagator, start));
+        return (points, FindBestMono(network, halogens, propagator, start));
     }
 
     private static double Weigh(double[] amounts, int[] halogens)
@@ -55,8 +55,7 @@ internal static class CourseSolver
     }
 
     private static CoursePoint Describe(
-        CourseNetwork network, CourseOptions options, int[] halogens, double[] state, double exposure,
-        double equivalents)
+        CourseNetwork network, int[] halogens, double[] state, double exposure, double equivalents)
     {
         int speciesCount = network.Species.Count;
         double[] byCount = new double[1 + network.Species.Max(static species => species.HalogenCount)];
@@ -85,7 +84,7 @@ internal static class CourseSolver
     }
 
     private static CourseOptimum? FindBestMono(
-        CourseNetwork network, CourseOptions options, int[] halogens, ExposurePropagator propagator, double[] start)
+        CourseNetwork network, int[] halogens, ExposurePropagator propagator, double[] start)
     {
         int[] mono = [.. Enumerable.Range(0, network.Species.Count).Where(i => halogens[i] == 1)];
         if (mono.Length == 0 || propagator.Unit == 0)
@@ -129,7 +128,7 @@ internal static class CourseSolver
         }
 
         double[] state = propagator.Advance(start, high);
-        CoursePoint point = Describe(network, options, halogens, state, high, Weigh(state, halogens));
+        CoursePoint point = Describe(network, halogens, state, high, Weigh(state, halogens));
         return new CourseOptimum(point.Equivalents, point.Conversion, Mono(state), isLimit, point);
     }
 }
