@@ -50,7 +50,21 @@ public static partial class ProblemCatalogue
             "Dendrimers and molecules with many nested equivalent groups have groups with millions of elements.",
             "Enumerate a fragment that stands for the repeated part.");
 
-        /// <summary>Substitution at an already marked stereocentre opens it.</summary>
+        /// <summary>The products of a very large molecule would not fit in memory.</summary>
+        public static readonly ProblemDescriptor TooManyAtoms = new(
+            "product-atom-limit", Severity.Error, "Too many products of a very large molecule",
+            "From site {0} on no products are built: together they would hold more than {1} atoms.",
+            "Every product is as large as the substrate, so memory grows with the square of its size.",
+            "Raise the limit, or work on the part of the molecule that matters.");
+
+        /// <summary>The molecule is too large for isomer enumeration.</summary>
+        public static readonly ProblemDescriptor MoleculeTooLarge = new(
+            "isomers-molecule-too-large", Severity.Error, "Molecule too large for isomer enumeration",
+            "The molecule has {0} atoms; isomers are enumerated up to {1} atoms.",
+            "The symmetry search grows with the square of the size.",
+            "Enumerate a smaller model of the part that matters.");
+
+        /// <summary>A site has no rate.</summary>
         public static readonly ProblemDescriptor SiteShareMissing = new(
             "product-share-missing", Severity.Caution, "Products of a site without a rate",
             "Site {0} has no rate, so its products have no share and the shares of the others leave it out.",
@@ -60,7 +74,7 @@ public static partial class ProblemCatalogue
         internal static IReadOnlyList<ProblemDescriptor> Entries =>
         [
             RingPositionExcluded, HeteroatomEndExcluded, StrainedEndExcluded, EndSplitUnknown, EndSplitFromAnalogue,
-            SymmetryTooLarge, SiteShareMissing,
+            SymmetryTooLarge, SiteShareMissing, TooManyAtoms, MoleculeTooLarge,
         ];
     }
 }

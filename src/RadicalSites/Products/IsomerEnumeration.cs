@@ -17,6 +17,9 @@ namespace RadicalSites.Products;
 /// </remarks>
 public sealed class IsomerEnumeration
 {
+    /// <summary>Largest molecule, in atoms, whose isomers are enumerated.</summary>
+    public const int AtomLimit = 2000;
+
     private readonly IsomerSubstrate substrate;
     private readonly SubstitutionSymmetry? symmetry;
     private readonly bool symmetryIsWhole;
@@ -43,8 +46,7 @@ public sealed class IsomerEnumeration
     public int HydrogenCount => substrate.HydrogenCount;
 
     /// <summary>
-    /// Remarks: no site, stereo marks of the substrate that mean nothing, or a symmetry too large to list (then there are
-    /// neither counts nor products).
+    /// Remarks: no site, or a molecule or symmetry too large (then there are neither counts nor products).
     /// </summary>
     public IReadOnlyList<Diagnostic> Diagnostics { get; }
 
@@ -65,6 +67,13 @@ public sealed class IsomerEnumeration
         if (substrate.Carbons.Length == 0)
         {
             diagnostics.Add(Diagnostic.Create(ProblemCatalogue.General.NoSites, []));
+        }
+
+        if (molecule.AtomCount > AtomLimit)
+        {
+            diagnostics.Add(Diagnostic.Create(
+                ProblemCatalogue.Products.MoleculeTooLarge, [], molecule.AtomCount, AtomLimit));
+            return new IsomerEnumeration(molecule, options, substrate, null, false, diagnostics.AsReadOnly());
         }
 
         StereoPermutations? stereo = substrate.Molecule.StereoElements.Count > 0

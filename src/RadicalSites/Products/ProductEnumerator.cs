@@ -40,7 +40,10 @@ public static partial class ProductEnumerator
         var work = new Work(analysis, halogen, options, shares);
         foreach (Site site in analysis.Sites)
         {
-            work.AddSite(site);
+            if (!work.AddSite(site))
+            {
+                break;
+            }
         }
 
         return work.Finish();
@@ -54,8 +57,16 @@ public static partial class ProductEnumerator
         private readonly List<Diagnostic> diagnostics = [];
         private Dictionary<string, ProductDraft>? index;
 
-        internal void AddSite(Site site)
+        // Returns false when the products together grow beyond the limit.
+        internal bool AddSite(Site site)
         {
+            if ((long)(drafts.Count + 1) * analysis.Molecule.AtomCount > options.AtomLimit && drafts.Count > 0)
+            {
+                diagnostics.Add(Diagnostic.Create(
+                    ProblemCatalogue.Products.TooManyAtoms, site.Carbons, site.Number, options.AtomLimit));
+                return false;
+            }
+
             if (shares is not null && shares.ShareOf(site.Number) is null)
             {
                 diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.SiteShareMissing, site.Carbons, site.Number));
@@ -74,6 +85,8 @@ public static partial class ProductEnumerator
             {
                 AddDelocalised(site, direct, smiles, hasMirrorImage);
             }
+
+            return true;
         }
 
         private ProductDraft Find(string smiles, Molecule molecule)

@@ -13,6 +13,12 @@ public sealed record ProductOptions
     /// <summary>Whether products at the other ends of delocalised radicals are listed; on by default.</summary>
     public bool IncludeTransposed { get; init; } = true;
 
+    /// <summary>
+    /// Most atoms of all products together, 1 or more; 4,000,000 by default. It bounds the memory of a very large
+    /// molecule, whose products are as large as itself.
+    /// </summary>
+    public long AtomLimit { get; init; } = 4_000_000;
+
     /// <summary>Most stereoisomers listed for one product when expanding, 1 or more; 1024 by default.</summary>
     public int StereoisomerLimit { get; init; } = 1024;
 }

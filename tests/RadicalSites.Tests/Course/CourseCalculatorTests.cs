@@ -42,6 +42,37 @@ public class CourseCalculatorTests
         }
     }
 
+    [Fact]
+    public void Follow_methane_near_440_C_gives_the_industrial_product_ratio()
+    {
+        // Thermal chlorination of methane near 440 C: CH3Cl 37, CH2Cl2 41, CHCl3 19, CCl4 3 mol % of the chloromethanes
+        // (Weissermel and Arpe, Industrial Organic Chemistry, chapter on halogen derivatives of methane; from memory).
+        // The same mean chlorine content, 1.88 per molecule, marks the point of the curve to compare.
+        HalogenationCourse course = Follow("C", 713.15, new CourseOptions { MaximumEquivalents = 2, PointCount = 401 });
+        CoursePoint point = course.Points.Skip(1).MinBy(
+            static point => Math.Abs((point.Equivalents / point.Conversion) - 1.88))!;
+        double[] percent = [.. point.Amounts.Skip(1).Select(amount => 100 * amount / point.Conversion)];
+
+        Assert.InRange(percent[0], 37 - 3, 37 + 3);
+        Assert.InRange(percent[1], 41 - 3, 41 + 3);
+        Assert.InRange(percent[2], 19 - 3, 19 + 3);
+        Assert.InRange(percent[3], 3 - 3, 3 + 3);
+    }
+
+    [Fact]
+    public void Follow_toluene_one_equivalent_gives_mainly_benzyl_chloride()
+    {
+        // 100 g of boiling toluene that has gained 37 g: benzyl chloride "forms the greater part of the product", then come
+        // unchanged toluene and some benzal chloride (Cohen, Practical Organic Chemistry, preparation of benzyl chloride).
+        double equivalents = 37 / (35.45 - 1.008) / (100 / 92.14);
+        HalogenationCourse course = Follow(
+            "Cc1ccccc1", 383.15, new CourseOptions { MaximumEquivalents = equivalents, PointCount = 2 });
+
+        IReadOnlyList<double> amounts = course.Points[^1].Amounts;
+        Assert.True(amounts[1] > 0.5);
+        Assert.True(amounts[1] > amounts[0] && amounts[0] > amounts[2] && amounts[2] > amounts[3]);
+    }
+
     [Theory]
     [InlineData(0.167, 0.0278)]
     public void Follow_toluene_reaches_the_known_yield_of_benzyl_chloride(double second, double third)

@@ -147,6 +147,16 @@ public class IsomerEnumerationTests
         Assert.Equal("sites-none", isomers.Diagnostics.Single().Code);
     }
 
+    [Fact]
+    public void Of_too_large_a_molecule_says_so()
+    {
+        IsomerEnumeration isomers = IsomerEnumeration.Of(SmilesReader.Parse(new string('C', 2001)), new IsomerOptions());
+
+        Assert.Empty(isomers.Enumerate());
+        Assert.Null(isomers.Count(1));
+        Assert.Equal("isomers-molecule-too-large", isomers.Diagnostics.Single().Code);
+    }
+
     private static IEnumerable<string> Lines(Molecule molecule, IsomerOptions options) =>
         IsomerEnumeration.Of(molecule, options).Enumerate().Select(static one => $"{one.CanonicalSmiles} {one.Degeneracy}");
 

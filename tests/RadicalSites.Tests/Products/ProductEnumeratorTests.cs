@@ -110,6 +110,17 @@ public class ProductEnumeratorTests
         Assert.Contains(set.Diagnostics, diagnostic => diagnostic.Code == code);
     }
 
+    [Fact]
+    public void Enumerate_limit_of_atoms_is_kept_and_said()
+    {
+        SiteAnalysis sites = SiteFinder.Find(SmilesReader.Parse(new string('C', 100)));
+
+        ProductSet set = ProductEnumerator.Enumerate(sites, 17, new ProductOptions { AtomLimit = 1000 });
+
+        Assert.Equal(10, set.Products.Count);
+        Assert.Equal("product-atom-limit", set.Diagnostics.Single().Code);
+    }
+
     [Theory]
     [InlineData(1)]
     [InlineData(85)]
