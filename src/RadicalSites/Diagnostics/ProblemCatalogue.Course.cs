@@ -39,9 +39,9 @@ public static partial class ProblemCatalogue
         /// <summary>The split of transposed products was not known.</summary>
         public static readonly ProblemDescriptor SplitUnknown = new(
             "course-split-unknown", Severity.Caution, "Transposed products are not told apart",
-            "A delocalised radical gives products whose split is unknown; the course carries all of it as {0}.",
+            "Delocalised radicals give products whose split is unknown; the course carries them as the direct product. Species concerned: {0}.",
             "No published ratio applies to the ends of this radical.",
-            "Read the amount of that species as the sum over the transposed isomers.");
+            "Read the amount of a direct product there as the sum over its transposed isomers.");
 
         /// <summary>Sites without a rate stay out of the course.</summary>
         public static readonly ProblemDescriptor SitesWithoutRate = new(

@@ -30,6 +30,12 @@ public static partial class ProductEnumerator
             }
 
             EndSplit? split = ends.Count == 1 ? null : EndSplit.Find(analysis.Molecule, site, ends[^1].Atom, ends.Count, halogen);
+            if (split is null && options.GivesUnknownSplitToDirect && ends.Count > 1)
+            {
+                ReportSplit(site, ends.Count, split);
+                ends.RemoveRange(1, ends.Count - 1);
+            }
+
             for (int i = 0; i < ends.Count; i++)
             {
                 (string smiles, Molecule molecule, int _, ProductRoute route) = ends[i];

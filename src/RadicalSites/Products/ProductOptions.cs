@@ -13,6 +13,9 @@ public sealed record ProductOptions
     /// <summary>Whether products at the other ends of delocalised radicals are listed; on by default.</summary>
     public bool IncludeTransposed { get; init; } = true;
 
+    /// <summary>Whether an unknown split between the ends of a radical goes to the direct product as a whole.</summary>
+    internal bool GivesUnknownSplitToDirect { get; init; }
+
     /// <summary>
     /// Most atoms of all products together, 1 or more; 4,000,000 by default. It bounds the memory of a very large
     /// molecule, whose products are as large as itself.
