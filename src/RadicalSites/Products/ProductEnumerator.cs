@@ -2,6 +2,7 @@ using System;
 using System.Collections.Generic;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
+using RadicalSites.Selectivity;
 using RadicalSites.Sites;
 using RadicalSites.Symmetry;
 
@@ -23,9 +24,30 @@ public static partial class ProductEnumerator
     /// <returns>The products by canonical SMILES, shares <see langword="null"/>.</returns>
     /// <exception cref="ArgumentOutOfRangeException">The halogen is none of F, Cl, Br, I.</exception>
     public static ProductSet Enumerate(SiteAnalysis analysis, int halogen, ProductOptions? options = null) =>
-        Enumerate(analysis, halogen, null, options);
+        Enumerate(analysis, halogen, (ISiteShares?)null, options);
 
-    /// <summary>Lists the products with shares.</summary>
+    /// <summary>Lists the products with the shares of the selectivity model.</summary>
+    /// <param name="analysis">The sites of the substrate.</param>
+    /// <param name="halogen">Atomic number of the halogen: 9, 17, 35 or 53.</param>
+    /// <param name="selectivity">Rates and shares of the same sites.</param>
+    /// <param name="options">What to list, or <see langword="null"/> for the defaults.</param>
+    /// <returns>
+    /// The products by falling share. A share is <see langword="null"/> with bounds where the split between the ends of a
+    /// radical is unknown, and <see langword="null"/> without bounds where a site has no rate.
+    /// </returns>
+    /// <exception cref="ArgumentOutOfRangeException">The halogen is none of F, Cl, Br, I.</exception>
+    /// <exception cref="ArgumentException">The selectivity belongs to another number of sites.</exception>
+    public static ProductSet Enumerate(
+        SiteAnalysis analysis, int halogen, SelectivityResult selectivity, ProductOptions? options = null)
+    {
+        ArgumentNullException.ThrowIfNull(analysis);
+        ArgumentNullException.ThrowIfNull(selectivity);
+        return selectivity.Sites.Count == analysis.Sites.Count
+            ? Enumerate(analysis, halogen, new SelectivityShares(selectivity), options)
+            : throw new ArgumentException("The selectivity belongs to another molecule.", nameof(selectivity));
+    }
+
+    /// <summary>Lists the products with shares from any source.</summary>
     internal static ProductSet Enumerate(
         SiteAnalysis analysis, int halogen, ISiteShares? shares, ProductOptions? options)
     {
