@@ -20,7 +20,7 @@ internal sealed class ProductDraft(string smiles, Molecule molecule)
     /// <summary>Sites with the part of their share that comes here; <see cref="double.NaN"/> = unknown part.</summary>
     internal List<(int Site, int Hydrogens, double Part, double PartLow, double PartHigh)> Origins { get; } = [];
 
-    /// <summary>Adds a site; parts of one site that arrive by several ways are added up.</summary>
+    /// <summary>Adds a site; carbons of one site that arrive one after the other are added up.</summary>
     internal void Add(int site, int hydrogens, double part, double partLow, double partHigh)
     {
         for (int i = 0; i < Origins.Count; i++)
@@ -29,7 +29,7 @@ internal sealed class ProductDraft(string smiles, Molecule molecule)
             {
                 var known = Origins[i];
                 Origins[i] = (
-                    site, hydrogens, known.Part + part, known.PartLow + partLow, System.Math.Min(1, known.PartHigh + partHigh));
+                    site, known.Hydrogens + hydrogens, known.Part + part, known.PartLow + partLow, System.Math.Min(1, known.PartHigh + partHigh));
                 return;
             }
         }

@@ -11,7 +11,8 @@ public static partial class ProductEnumerator
     private sealed partial class Work
     {
         // Direct product and those at the other ends of the radical; equal products need no split.
-        private void AddDelocalised(Site site, Molecule direct, string directSmiles, bool hasMirrorImage)
+        private void AddDelocalised(
+            Site site, double whole, Molecule direct, string directSmiles, bool hasMirrorImage)
         {
             var paths = new List<int[]>();
             DelocalisationBarriers barriers = DelocalisationWalk.Find(analysis.Molecule, site.Carbons[0], paths);
@@ -47,18 +48,18 @@ public static partial class ProductEnumerator
                 draft.HasMirrorImage |= hasMirrorImage;
                 if (ends.Count == 1)
                 {
-                    draft.Add(site.Number, site.HydrogenCount, 1, 1, 1);
+                    draft.Add(site.Number, site.HydrogenCount, whole, whole, whole);
                 }
                 else if (split is null)
                 {
-                    draft.Add(site.Number, site.HydrogenCount, double.NaN, 0, 1);
+                    draft.Add(site.Number, site.HydrogenCount, double.NaN, 0, whole);
                 }
                 else
                 {
                     double part = i == 0 ? split.DirectPart : 1 - split.DirectPart;
                     draft.Add(
-                        site.Number, site.HydrogenCount, part, Math.Max(0, part - split.HalfWidth),
-                        Math.Min(1, part + split.HalfWidth));
+                        site.Number, site.HydrogenCount, whole * part, whole * Math.Max(0, part - split.HalfWidth),
+                        whole * Math.Min(1, part + split.HalfWidth));
                 }
             }
 

@@ -94,6 +94,43 @@ public static partial class ProductEnumerator
                 diagnostics.Add(Diagnostic.Create(ProblemCatalogue.Products.SiteShareMissing, site.Carbons, site.Number));
             }
 
+            if (!HasDiastereotopicCarbons(site))
+            {
+                AddGroup(site, 1);
+                return true;
+            }
+
+            // A site of merged diastereotopic carbons has one product, or two that differ by stereo, for each kind of carbon.
+            var rest = new List<int>(site.Carbons);
+            while (rest.Count > 0)
+            {
+                int first = rest[0];
+                int[] members = [.. rest.FindAll(carbon => AreMirrored(first, carbon))];
+                rest.RemoveAll(carbon => AreMirrored(first, carbon));
+                AddGroup(site with { Carbons = members }, (double)members.Length / site.Carbons.Count);
+            }
+
+            return true;
+        }
+
+        private bool AreMirrored(int first, int second) =>
+            analysis.Symmetry!.Between(first, second) <= Topicity.Enantiotopic;
+
+        private bool HasDiastereotopicCarbons(Site site)
+        {
+            for (int i = 1; i < site.Carbons.Count && analysis.Symmetry is not null; i++)
+            {
+                if (!AreMirrored(site.Carbons[0], site.Carbons[i]))
+                {
+                    return true;
+                }
+            }
+
+            return false;
+        }
+
+        private void AddGroup(Site site, double part)
+        {
             Molecule direct = substrate.ReplaceAt(site, halogen, out string smiles, out bool hasMirrorImage);
             if (site.Conjugation.Count == 0 || !options.IncludeTransposed)
             {
@@ -101,14 +138,12 @@ public static partial class ProductEnumerator
                 Classify(draft, site, substrate.Outcome(site, halogen, direct));
                 draft.Route = ProductRoute.Direct;
                 draft.HasMirrorImage |= hasMirrorImage;
-                draft.Add(site.Number, site.HydrogenCount, 1, 1, 1);
+                draft.Add(site.Number, site.HydrogenCount, part, part, part);
             }
             else
             {
-                AddDelocalised(site, direct, smiles, hasMirrorImage);
+                AddDelocalised(site, part, direct, smiles, hasMirrorImage);
             }
-
-            return true;
         }
 
         private ProductDraft Find(string smiles, Molecule molecule)
@@ -157,7 +192,7 @@ public static partial class ProductEnumerator
             }
 
             Site other = analysis.Sites[draft.Origins[0].Site - 1];
-            bool sameConstitution = other.Number != site.Number && analysis.Symmetry is { } symmetry
+            bool sameConstitution = analysis.Symmetry is { } symmetry
                 && symmetry.OrbitOf(other.Carbons[0], EquivalenceLevel.Constitutional)
                     == symmetry.OrbitOf(site.Carbons[0], EquivalenceLevel.Constitutional);
             if (sameConstitution && outcome is not (StereoOutcome.Lost or StereoOutcome.Epimerised))

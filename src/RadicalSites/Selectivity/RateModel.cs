@@ -67,9 +67,11 @@ internal sealed partial class RateModel
             energy = deviation - StrongThreshold;
         }
 
-        if (rateClass == RateClass.Methyl && site.AlphaGroups.Count > 0)
+        if ((rateClass == RateClass.Methyl && site.AlphaGroups.Count > 0)
+            || (site.Conjugation.Count > 0 && CountHalogens(site) > 0))
         {
-            // Halomethanes: bond energy gives the wrong order there, the alpha terms hold all of it.
+            // Halomethanes and side-chain halides of arenes and alkenes: bond energy gives the wrong order there (benzyl
+            // chloride reacts more slowly than toluene in spite of its weaker bond), the alpha terms hold all of it.
             slope = 0;
         }
 
