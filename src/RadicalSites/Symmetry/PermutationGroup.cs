@@ -46,41 +46,6 @@ internal static class PermutationGroup
         return elements;
     }
 
-    /// <summary>
-    /// The coarsest partition finer than the given one that every permutation maps to itself; classes are named by their
-    /// lowest member.
-    /// </summary>
-    internal static int[] Invariant(int[] classes, List<int[]> generators)
-    {
-        int[] current = classes;
-        for (bool changed = true; changed;)
-        {
-            changed = false;
-            foreach (int[] image in generators)
-            {
-                // Members of one class stay together only when their images are together.
-                Dictionary<(int Class, int ImageClass), int> lowest = [];
-                int[] next = new int[current.Length];
-                for (int i = 0; i < current.Length; i++)
-                {
-                    (int, int) key = (current[i], current[image[i]]);
-                    if (!lowest.TryGetValue(key, out int root))
-                    {
-                        root = i;
-                        lowest.Add(key, i);
-                    }
-
-                    next[i] = root;
-                    changed |= root != current[i];
-                }
-
-                current = next;
-            }
-        }
-
-        return current;
-    }
-
     private sealed class ByContent : IEqualityComparer<int[]>
     {
         public bool Equals(int[]? x, int[]? y) => x.AsSpan().SequenceEqual(y);

@@ -75,52 +75,6 @@ public sealed partial class SymmetryAnalysis
             enantiotopic = Meet(enantiotopic, workspace.MirrorOrbits);
             homotopic = Meet(homotopic, workspace.ProperOrbits);
         }
-
-        if (graph.ElementCount > stated
-            && (IsArbitrary(constitutional, enantiotopic) || IsArbitrary(constitutional, homotopic)))
-        {
-            List<int[]> symmetries = FindStatedSymmetries(workspace, stated);
-            enantiotopic = PermutationGroup.Invariant(enantiotopic, symmetries);
-            homotopic = PermutationGroup.Invariant(homotopic, symmetries);
-        }
-    }
-
-    /// <summary>
-    /// Whether a class of several atoms is part of a larger orbit, so that which atoms share it may be a matter of naming.
-    /// </summary>
-    private static bool IsArbitrary(int[] constitutional, int[] classes)
-    {
-        bool[] plural = new bool[classes.Length];
-        bool[] split = new bool[classes.Length];
-        bool any = false;
-        for (int i = 0; i < classes.Length; i++)
-        {
-            int root = constitutional[i];
-            plural[root] |= classes[i] != i;
-            split[root] |= classes[i] != root;
-        }
-
-        for (int i = 0; i < classes.Length; i++)
-        {
-            any |= plural[i] && split[i];
-        }
-
-        return any;
-    }
-
-    /// <summary>Generators of the automorphisms that keep what the molecule states.</summary>
-    private static List<int[]> FindStatedSymmetries(SymmetryWorkspace workspace, int stated)
-    {
-        SymmetryGraph graph = workspace.Graph;
-        List<int[]> generators = [];
-        int count = graph.ElementCount;
-        graph.ElementCount = stated;
-        graph.MarkElements();
-        workspace.Canonical.Generators = generators;
-        workspace.Canonical.Run(graph, SearchLimit);
-        workspace.Canonical.Generators = null;
-        graph.ElementCount = count;
-        return generators;
     }
 
     /// <summary>Classes of atoms that are together in both; the first is the finer of earlier readings.</summary>

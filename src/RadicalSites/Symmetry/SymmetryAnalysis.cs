@@ -11,6 +11,9 @@ namespace RadicalSites.Symmetry;
 /// Mirror images are taken fragment by fragment, so that a counter-ion does not change what an ion is.
 /// A centre or double bond that could have a configuration but states none is read in the most symmetric way between
 /// equivalent places, yet it keeps its own geometry: the CH2 of butan-2-ol is diastereotopic with or without a mark.
+/// Where like ligands of several places are told apart only by geometry (the methyls of two isopropyl groups in a chiral
+/// molecule), a graph does not say which of one place goes with which of the other; number and size of the classes are
+/// fixed, and the atoms of lower index go together as far as the input order decides.
 /// Immutable and safe for use by many threads.
 /// </remarks>
 public sealed partial class SymmetryAnalysis
