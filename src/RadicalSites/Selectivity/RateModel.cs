@@ -74,6 +74,12 @@ internal sealed partial class RateModel
             // chloride reacts more slowly than toluene in spite of its weaker bond), the alpha terms hold all of it.
             slope = 0;
         }
+        else if (HasAcceptor(site))
+        {
+            // Beside halogens and acceptors the bond is weak but the attack slow: for early transition states the alpha
+            // terms hold all of it, for late ones half of the bond's weakening counts.
+            slope *= carrier.SlopeWeak > 0.5 ? 0.5 : 0;
+        }
 
         value -= slope * energy * inverseEnergy;
         double polar = PolarTerm(molecule, site, out double polarSize) * Reference / kelvin;
@@ -115,6 +121,19 @@ internal sealed partial class RateModel
         }
 
         return (RateClass)Math.Min(3, degree + donors);
+    }
+
+    private static bool HasAcceptor(Site site)
+    {
+        foreach (AlphaGroup group in site.AlphaGroups)
+        {
+            if (!IsDonor(group.Kind))
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     private static bool IsDonor(AlphaGroupKind kind) => kind is AlphaGroupKind.Hydroxyl or AlphaGroupKind.Ether

@@ -1,0 +1,113 @@
+using System;
+using System.CommandLine;
+using System.IO;
+using System.Linq;
+using RadicalSites.Products;
+using RadicalSites.Quantities;
+using RadicalSites.Selectivity;
+using RadicalSites.Thermochemistry;
+
+namespace RadicalSites.Cli.Commands;
+
+/// <summary>Options that say which reaction and which data.</summary>
+internal sealed class ChemistryOptions
+{
+    private readonly Option<string> reagent = new("--reagent")
+    {
+        Description = "Halogen source: " + string.Join(", ", ReagentCatalogue.All.Select(static r => r.Id)) + ".",
+        DefaultValueFactory = static _ => "Br2",
+    };
+
+    private readonly Option<string?> temperature = new("--temperature") { Description = "80C or 353K; a bare number is in C. Default: the usual one of the reagent." };
+    private readonly Option<string?> solvent = new("--solvent") { Description = "Id of the solvent, see 'data solvents'; default: gas or inert solvent." };
+    private readonly Option<string?> table = new("--bde-table") { Description = "Your own table of bond enthalpies, laid over the shipped one." };
+    private readonly Option<bool> merge = new("--merge-diastereotopic") { Description = "One site for carbons that only existing stereo tells apart." };
+    private readonly Option<string> stereo = new("--stereo")
+    {
+        Description = "Stereo of products: none, mark (keep existing centres) or expand (list stereoisomers).",
+        DefaultValueFactory = static _ => "mark",
+    };
+
+    internal ChemistryOptions() => stereo.AcceptOnlyFromAmong("none", "mark", "expand");
+
+    internal void AddReaction(Command command)
+    {
+        command.Options.Add(reagent);
+        command.Options.Add(temperature);
+        command.Options.Add(solvent);
+    }
+
+    internal void AddData(Command command)
+    {
+        command.Options.Add(table);
+        command.Options.Add(merge);
+    }
+
+    internal void AddStereo(Command command) => command.Options.Add(stereo);
+
+    internal ReactionConditions ReadConditions(ParseResult parsed)
+    {
+        string id = parsed.GetValue(reagent)!;
+        Reagent found = ReagentCatalogue.Find(id) ?? throw new ToolException(
+            ExitCode.WrongUsage, $"there is no reagent '{id}'; known are {string.Join(", ", ReagentCatalogue.All.Select(static r => r.Id))}.");
+        return new ReactionConditions(found, ReadTemperature(parsed), ReadSolvent(parsed));
+    }
+
+    internal Temperature? ReadTemperature(ParseResult parsed)
+    {
+        if (parsed.GetValue(temperature) is not { } text)
+        {
+            return null;
+        }
+
+        return Temperature.TryParse(text, out Temperature value)
+            ? value
+            : throw new ToolException(ExitCode.WrongUsage, $"'{text}' is no temperature above absolute zero; write 80C or 353K.");
+    }
+
+    internal string? ReadSolvent(ParseResult parsed)
+    {
+        if (parsed.GetValue(solvent) is not { } id)
+        {
+            return null;
+        }
+
+        return Heat.HeatTables.FindSolvent(id)?.Id ?? throw new ToolException(
+            ExitCode.WrongUsage,
+            $"there is no solvent '{id}'; known are {string.Join(", ", Heat.HeatTables.Solvents.Select(static s => s.Id))}.");
+    }
+
+    internal HalogenationOptions ReadOptions(ParseResult parsed, bool withStereo)
+    {
+        BdeTable bdes = BdeTable.Default;
+        if (parsed.GetValue(table) is { } file)
+        {
+            bdes = ReadTable(file).Overlay(bdes);
+        }
+
+        return new HalogenationOptions
+        {
+            Table = bdes,
+            MergeDiastereotopic = parsed.GetValue(merge),
+            Stereo = withStereo ? ReadStereo(parsed) : ProductStereoMode.Mark,
+        };
+    }
+
+    internal ProductStereoMode ReadStereo(ParseResult parsed) =>
+        Enum.Parse<ProductStereoMode>(parsed.GetValue(stereo)!, ignoreCase: true);
+
+    internal static BdeTable ReadTable(string file)
+    {
+        string text;
+        try
+        {
+            text = File.ReadAllText(file);
+        }
+        catch (Exception error) when (error is IOException or UnauthorizedAccessException)
+        {
+            throw new ToolException(ExitCode.InputOutput, $"cannot read {file}: {error.Message}");
+        }
+
+        return BdeTable.Parse(Path.GetFileName(file), text);
+    }
+}

@@ -1,0 +1,8 @@
+namespace RadicalSites.Reporting;
+
+/// <summary>Where a record comes from.</summary>
+/// <remarks>Immutable and safe for use by many threads.</remarks>
+/// <param name="Number">1-based number of the record in the input.</param>
+/// <param name="Text">The SMILES, or a short description of another format.</param>
+/// <param name="Name">Name of the record, or <see langword="null"/>.</param>
+public sealed record RecordSource(long Number, string Text, string? Name);
