@@ -41,7 +41,10 @@ internal static class Program
 
         try
         {
-            return new FileStream(new SafeFileHandle(1, ownsHandle: false), FileAccess.Write, bufferSize: 0);
+            var stream = new FileStream(new SafeFileHandle(1, ownsHandle: false), FileAccess.Write, bufferSize: 0);
+
+            // A regular file keeps a position of its own in the file stream and would be overwritten from its start.
+            return stream.CanSeek ? Console.OpenStandardOutput() : stream;
         }
         catch (Exception error) when (error is IOException or UnauthorizedAccessException or ArgumentException)
         {

@@ -1,5 +1,6 @@
 using System;
 using System.CommandLine;
+using System.CommandLine.Help;
 using System.IO;
 using System.Linq;
 using RadicalSites.Cli.Commands;
@@ -26,14 +27,17 @@ internal static class Tool
             if (arguments.Length == 0)
             {
                 host.Error.Write("No command given.\n");
-                CommandTree.WriteHelp(root, ["--help"], host.Error);
+                using var help = new StringWriter(System.Globalization.CultureInfo.InvariantCulture) { NewLine = "\n" };
+                root.Parse(["--help"]).Invoke(new InvocationConfiguration { Output = help, Error = help });
+                host.Error.Write(HelpText.Finish(help.ToString(), root.Name));
                 return ExitCode.WrongUsage;
             }
 
             ParseResult parsed = root.Parse(arguments);
             if (parsed.Errors.Count > 0)
             {
-                foreach (string message in parsed.Errors.Select(static error => error.Message).Distinct())
+                string[] messages = [.. parsed.Errors.Select(static error => error.Message).Distinct()];
+                foreach (string message in messages.Where(message => messages.Length == 1 || !message.StartsWith("Required command", StringComparison.Ordinal)))
                 {
                     host.Error.Write($"radicalsites: {message}\n");
                 }
@@ -42,14 +46,18 @@ internal static class Tool
                 return ExitCode.WrongUsage;
             }
 
-            using var output = new StreamWriter(host.Output, new System.Text.UTF8Encoding(false), leaveOpen: true) { NewLine = "\n" };
-            return parsed.Invoke(new InvocationConfiguration
+            using var text = new StringWriter(System.Globalization.CultureInfo.InvariantCulture) { NewLine = "\n" };
+            int code = parsed.Invoke(new InvocationConfiguration
             {
-                Output = output,
+                Output = text,
                 Error = host.Error,
                 EnableDefaultExceptionHandler = false,
                 ProcessTerminationTimeout = null,
             });
+            host.Output.Write(System.Text.Encoding.UTF8.GetBytes(
+                parsed.Action is HelpAction ? HelpText.Finish(text.ToString(), parsed.CommandResult.Command.Name) : text.ToString()));
+            host.Output.Flush();
+            return code;
         }
         catch (ToolException error)
         {

@@ -1,6 +1,4 @@
-using System.Collections.Generic;
 using System.CommandLine;
-using System.IO;
 
 namespace RadicalSites.Cli.Commands;
 
@@ -24,7 +22,4 @@ internal static class CommandTree
         root.Subcommands.Add(ExplainCommand.Build(host));
         return root;
     }
-
-    internal static void WriteHelp(RootCommand root, IReadOnlyList<string> arguments, TextWriter writer) =>
-        root.Parse(arguments).Invoke(new InvocationConfiguration { Output = writer, Error = writer });
 }

@@ -11,10 +11,7 @@ internal static class ConvertCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "convert",
-            "Reads structures and writes them in another form.\n\nExamples:\n"
-            + "  radicalsites convert 'OCC'\n  radicalsites convert molecules.smi --order input");
+        var command = new Command("convert", "Reads structures and writes them in another form.");
         var records = new RecordOptions("smi");
         var order = new Option<string>("--order") { Description = "canonical or input.", DefaultValueFactory = static _ => "canonical" };
         order.AcceptOnlyFromAmong("canonical", "input");

@@ -16,9 +16,7 @@ internal static class DataCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "data",
-            "Tables, versions and sources.\n\nExamples:\n  radicalsites data bde 'CC(C)C'\n  radicalsites data sources ATCT");
+        var command = new Command("data", "Tables, versions and sources.");
         command.Subcommands.Add(Simple("reagents", "Halogen sources with carrier, by-product and range.", Reagents));
         command.Subcommands.Add(Simple("solvents", "Solvents with density, heat capacity, boiling point.", Solvents));
         command.Subcommands.Add(Bde());

@@ -9,10 +9,7 @@ internal static class ExplainCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "explain",
-            "What an error or caution code means and what to do.\n\nExamples:\n"
-            + "  radicalsites explain smiles-ring-unclosed\n  radicalsites explain --all");
+        var command = new Command("explain", "What an error or caution code means and what to do.");
         var code = new Argument<string?>("CODE") { Arity = ArgumentArity.ZeroOrOne, Description = "A code as printed in brackets after a message." };
         var all = new Option<bool>("--all") { Description = "List all codes." };
         command.Arguments.Add(code);

@@ -16,10 +16,7 @@ internal static class IsomersCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "isomers",
-            "Every distinct product of replacing C(sp3)-H by halogen, without energetics; one line for each.\n\nExamples:\n"
-            + "  radicalsites isomers CCC --halogen Cl --times 2\n  radicalsites isomers molecules.smi --format smi --stereo none");
+        var command = new Command("isomers", "Every distinct product of replacing C(sp3)-H by halogen, without energetics; one line for each.");
         var records = new RecordOptions("table", "json", "ndjson", "csv", "smi");
         var chemistry = new ChemistryOptions();
         var halogen = new Option<string>("--halogen") { Description = "F, Cl, Br or I.", DefaultValueFactory = static _ => "Br" };

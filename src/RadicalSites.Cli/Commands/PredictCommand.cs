@@ -9,11 +9,7 @@ internal static class PredictCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "predict",
-            "Shares of the sites with 90 % intervals, products, remarks, for one reagent and temperature.\n\nExamples:\n"
-            + "  radicalsites predict 'CC(C)C' --reagent Cl2 --temperature 25C\n"
-            + "  radicalsites predict molecules.smi --reagent NBS --format ndjson --threads 0");
+        var command = new Command("predict", "Shares of the sites with 90 % intervals, products, remarks, for one reagent and temperature.");
         var records = new RecordOptions("table", "json", "ndjson", "csv");
         var chemistry = new ChemistryOptions();
         records.AddTo(command);

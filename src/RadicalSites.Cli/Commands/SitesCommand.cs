@@ -9,10 +9,7 @@ internal static class SitesCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command(
-            "sites",
-            "C(sp3)-H sites: class, equivalence, bond dissociation enthalpy with evidence.\n\nExamples:\n"
-            + "  radicalsites sites 'Cc1ccccc1'\n  radicalsites sites molecules.smi --format csv --output sites.csv");
+        var command = new Command("sites", "C(sp3)-H sites: class, equivalence, bond dissociation enthalpy with evidence.");
         var records = new RecordOptions("table", "json", "ndjson", "csv");
         var chemistry = new ChemistryOptions();
         records.AddTo(command);
