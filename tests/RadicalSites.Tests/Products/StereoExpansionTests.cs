@@ -70,4 +70,25 @@ public class StereoExpansionTests
         Assert.Equal(9, all.Count);
         Assert.Equal(9, all.Distinct().Count());
     }
+
+    // Cubane under its 24 rotations: 1, 1, 3, 3, 7, 3, 3, 1, 1 (Polya 1937, in every textbook on the theorem).
+    // Adamantane under its 12 rotations, by hand from the cycle index (x1^16 + 8 x1 x3^5 + 3 x2^8) / 12: 2, 12, 50.
+    // Norbornane under its two rotations, x1^12 and x2^6: 6, (66 + 6) / 2 = 36.
+    // Cyclopropane under its six rotations, (x1^6 + 2 x3^2 + 3 x2^3) / 6: 1, 4, 4.
+    [Theory]
+    [InlineData("C12C3C4C1C5C2C3C45", "1 3 3 7 3 3 1 1")]
+    [InlineData("C1C2CC3CC1CC(C2)C3", "2 12 50")]
+    [InlineData("C1CC2CCC1C2", "6 36")]
+    [InlineData("C1CC1", "1 4 4 4 1 1")]
+    public void Expand_rigid_cages_have_the_counts_of_their_rotations(string smiles, string expected)
+    {
+        string[] counts = expected.Split(' ');
+        IEnumerable<int> actual = IsomerEnumeration.Of(
+            SmilesReader.Parse(smiles),
+            new IsomerOptions { MaximumTimes = counts.Length, Stereo = ProductStereoMode.Expand }).Enumerate()
+            .GroupBy(static one => one.HalogenCarbons.Count)
+            .Select(static group => group.SelectMany(static one => one.Stereoisomers!).Distinct().Count());
+
+        Assert.Equal(expected, string.Join(' ', actual));
+    }
 }
