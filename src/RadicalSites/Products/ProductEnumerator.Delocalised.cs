@@ -15,22 +15,23 @@ public static partial class ProductEnumerator
             Site site, double whole, Molecule direct, string directSmiles, bool hasMirrorImage)
         {
             var paths = new List<int[]>();
-            DelocalisationBarriers barriers = DelocalisationWalk.Find(analysis.Molecule, site.Carbons[0], paths);
-            Report(site, barriers);
-            var ends = new List<(string Smiles, Molecule Molecule, int Atom, ProductRoute Route)>
+            Report(site, HasMobileNeighbor(site)
+                ? DelocalisationWalk.Find(analysis.Molecule, site.Carbons[0], paths)
+                : DelocalisationBarriers.AromaticRing);
+            var ends = new List<(string Smiles, Molecule Molecule, int[] Path, ProductRoute Route)>
             {
-                (directSmiles, direct, site.Carbons[0], ProductRoute.Direct),
+                (directSmiles, direct, [], ProductRoute.Direct),
             };
             foreach (int[] path in paths)
             {
                 Molecule product = substrate.Transpose(path, halogen, out string smiles);
                 if (!ends.Exists(end => end.Smiles == smiles))
                 {
-                    ends.Add((smiles, product, path[^1], ProductRoute.Transposed));
+                    ends.Add((smiles, product, path, ProductRoute.Transposed));
                 }
             }
 
-            EndSplit? split = ends.Count == 1 ? null : EndSplit.Find(analysis.Molecule, site, ends[^1].Atom, ends.Count, halogen);
+            EndSplit? split = ends.Count == 1 ? null : EndSplit.Find(analysis.Molecule, site, ends[^1].Path[^1], ends.Count, halogen);
             if (split is null && options.GivesUnknownSplitToDirect && ends.Count > 1)
             {
                 ReportSplit(site, ends.Count, split);
@@ -39,11 +40,11 @@ public static partial class ProductEnumerator
 
             for (int i = 0; i < ends.Count; i++)
             {
-                (string smiles, Molecule molecule, int _, ProductRoute route) = ends[i];
+                (string smiles, Molecule molecule, int[] path, ProductRoute route) = ends[i];
                 ProductDraft draft = Find(smiles, molecule);
-                Classify(draft, site, route == ProductRoute.Direct
+                Classify(draft, site, route, route == ProductRoute.Direct
                     ? substrate.Outcome(site, halogen, molecule)
-                    : substrate.TransposedOutcome(molecule));
+                    : substrate.TransposedOutcome(path, halogen, molecule));
                 draft.Route = route == ProductRoute.Direct ? route : draft.Route;
                 draft.HasMirrorImage |= hasMirrorImage;
                 if (ends.Count == 1)
@@ -67,6 +68,20 @@ public static partial class ProductEnumerator
             {
                 ReportSplit(site, ends.Count, split);
             }
+        }
+
+        // Beside aromatic rings alone the radical has no other end that could take a halogen.
+        private static bool HasMobileNeighbor(Site site)
+        {
+            foreach (ConjugatedNeighbor neighbor in site.Conjugation)
+            {
+                if (neighbor.Kind is ConjugationKind.Allylic or ConjugationKind.Propargylic)
+                {
+                    return true;
+                }
+            }
+
+            return false;
         }
 
         private void Report(Site site, DelocalisationBarriers barriers)

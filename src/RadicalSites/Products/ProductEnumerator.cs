@@ -135,7 +135,7 @@ public static partial class ProductEnumerator
             if (site.Conjugation.Count == 0 || !options.IncludeTransposed)
             {
                 ProductDraft draft = Find(smiles, direct);
-                Classify(draft, site, substrate.Outcome(site, halogen, direct));
+                Classify(draft, site, ProductRoute.Direct, substrate.Outcome(site, halogen, direct));
                 draft.Route = ProductRoute.Direct;
                 draft.HasMirrorImage |= hasMirrorImage;
                 draft.Add(site.Number, site.HydrogenCount, part, part, part);
@@ -183,7 +183,7 @@ public static partial class ProductEnumerator
         }
 
         // Sites of one constitution differ by stereo alone, so a product they share is a mixture of diastereomers.
-        private void Classify(ProductDraft draft, Site site, StereoOutcome outcome)
+        private void Classify(ProductDraft draft, Site site, ProductRoute route, StereoOutcome outcome)
         {
             if (draft.Origins.Count == 0)
             {
@@ -192,7 +192,8 @@ public static partial class ProductEnumerator
             }
 
             Site other = analysis.Sites[draft.Origins[0].Site - 1];
-            bool sameConstitution = analysis.Symmetry is { } symmetry
+            bool sameConstitution = route == ProductRoute.Direct && draft.Route == ProductRoute.Direct
+                && analysis.Symmetry is { } symmetry
                 && symmetry.OrbitOf(other.Carbons[0], EquivalenceLevel.Constitutional)
                     == symmetry.OrbitOf(site.Carbons[0], EquivalenceLevel.Constitutional);
             if (sameConstitution && outcome is not (StereoOutcome.Lost or StereoOutcome.Epimerised))

@@ -1,4 +1,7 @@
+using System;
+using System.Buffers;
 using RadicalSites.Canonical;
+using RadicalSites.Formats.Smiles;
 using RadicalSites.Molecules;
 using RadicalSites.Symmetry;
 
@@ -7,18 +10,17 @@ namespace RadicalSites.Products;
 /// <summary>The text that makes two products one.</summary>
 internal static class ProductIdentity
 {
-    /// <summary>Canonical SMILES without stereo marks that mean nothing.</summary>
-    internal static string SmilesOf(Molecule molecule) => CanonicalSmiles.Write(
-        molecule.StereoElements.Count == 0 ? molecule : StereoPerception.WithoutPhantoms(molecule));
+    /// <summary>Canonical SMILES.</summary>
+    internal static string SmilesOf(Molecule molecule) => CanonicalSmiles.Write(molecule);
 
-    /// <summary>As <see cref="SmilesOf(Molecule)"/>; the molecule itself loses the marks too.</summary>
+    /// <summary>Canonical SMILES; the molecule loses the stereo marks that mean nothing, as the text does.</summary>
     internal static string SmilesOf(ref Molecule molecule)
     {
-        if (molecule.StereoElements.Count > 0)
-        {
-            molecule = StereoPerception.WithoutPhantoms(molecule);
-        }
-
-        return CanonicalSmiles.Write(molecule);
+        int[] ranks = ArrayPool<int>.Shared.Rent(molecule.AtomCount);
+        Span<int> used = ranks.AsSpan(0, molecule.AtomCount);
+        CanonicalRanking.Fill(molecule, CanonicalRankingOptions.Default, used, out molecule);
+        string text = SmilesWriter.Write(molecule, used);
+        ArrayPool<int>.Shared.Return(ranks);
+        return text;
     }
 }

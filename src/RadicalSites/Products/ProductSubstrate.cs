@@ -103,21 +103,76 @@ internal sealed class ProductSubstrate
     }
 
     /// <summary>Stereo outcome of a transposed product.</summary>
-    internal StereoOutcome TransposedOutcome(Molecule product)
+    internal StereoOutcome TransposedOutcome(int[] path, int halogen, Molecule product)
     {
-        int open = StereoUnits.CountOpen(product, out int openCentres);
-        int kept = product.StereoElements.Count;
-        if (open == 1 && openCentres == 1 && !StereoUnits.HasStatedCentre(product))
+        bool? bond = null;
+        bool? centre = null;
+        if (analysis.Symmetry is { } symmetry)
         {
-            return StereoOutcome.Racemic;
+            var made = new TranspositionStereo(symmetry, path, halogen);
+            bond = made.MakesDoubleBond();
+            centre = bond == true ? false : made.MakesCentre();
         }
 
-        if (open > 0)
+        if (bond is null || centre is null)
+        {
+            (bond, centre) = NewUnits(path, product);
+        }
+
+        if (bond == true)
         {
             return StereoOutcome.Diastereomers;
         }
 
+        if (centre == true)
+        {
+            return StereoUnits.HasStatedCentre(product) || HasOpenCentreOff(path)
+                ? StereoOutcome.Diastereomers
+                : StereoOutcome.Racemic;
+        }
+
+        int kept = product.StereoElements.Count;
         return kept < stereo.Length ? StereoOutcome.Lost : kept > 0 ? StereoOutcome.Retained : StereoOutcome.None;
+    }
+
+    // Units that the product has and the substrate has not; a double bond on the path is new wherever it stands.
+    private (bool Bond, bool Centre) NewUnits(int[] path, Molecule product)
+    {
+        units ??= StereoPerception.FindUnits(molecule);
+        bool bond = false;
+        int centres = 0;
+        foreach (StereoUnit unit in StereoPerception.FindUnits(product))
+        {
+            bool onPath = Array.IndexOf(path, unit.Focus) >= 0 && Array.IndexOf(path, unit.FocusEnd) >= 0;
+            bool known = false;
+            foreach (StereoUnit old in units)
+            {
+                known |= !onPath && old.Kind == unit.Kind && old.Focus == unit.Focus && old.FocusEnd == unit.FocusEnd;
+            }
+
+            if (!known && !unit.IsStated)
+            {
+                bond |= unit.Kind == StereoKind.CisTrans;
+                centres += unit.Kind == StereoKind.CisTrans ? 0 : 1;
+            }
+        }
+
+        // Two new centres at once stand to each other in two ways.
+        return (bond || centres > 1, centres > 0);
+    }
+
+    private bool HasOpenCentreOff(int[] path)
+    {
+        units ??= StereoPerception.FindUnits(molecule);
+        foreach (StereoUnit unit in units)
+        {
+            if (!unit.IsStated && unit.Kind != StereoKind.CisTrans && Array.IndexOf(path, unit.Focus) < 0)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 
     /// <summary>For each product atom the substrate atom, -1 for the halogen.</summary>

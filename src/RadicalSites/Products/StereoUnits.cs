@@ -59,25 +59,6 @@ internal static class StereoUnits
         return false;
     }
 
-    /// <summary>Stereo units that state nothing.</summary>
-    /// <param name="molecule">A product.</param>
-    /// <param name="centres">How many of them are centres or axes and not double bonds.</param>
-    internal static int CountOpen(Molecule molecule, out int centres)
-    {
-        int open = 0;
-        centres = 0;
-        foreach (StereoUnit unit in StereoPerception.FindUnits(molecule))
-        {
-            if (!unit.IsStated)
-            {
-                open++;
-                centres += unit.Kind == StereoKind.CisTrans ? 0 : 1;
-            }
-        }
-
-        return open;
-    }
-
     /// <summary>Whether a centre or axis is stated.</summary>
     internal static bool HasStatedCentre(Molecule molecule)
     {

@@ -8,6 +8,9 @@ namespace RadicalSites.Products;
 /// <summary>Builds the product of a delocalised radical that takes the halogen at the far end of a path.</summary>
 internal static class Transposition
 {
+    [ThreadStatic]
+    private static StructureDraft? draftOfThread;
+
     /// <summary>Moves every pi bond of the path one place towards the carbon that lost its hydrogen.</summary>
     /// <param name="molecule">The substrate.</param>
     /// <param name="path">Atoms from the carbon that lost its hydrogen to the end that takes the halogen; odd count.</param>
@@ -16,7 +19,8 @@ internal static class Transposition
     /// <returns>The product with aromaticity perceived anew, since a shift can make or break an aromatic ring.</returns>
     internal static Molecule Build(Molecule molecule, int[] path, int halogen, ReadOnlySpan<StereoElement> stereo)
     {
-        var draft = new StructureDraft();
+        StructureDraft draft = draftOfThread ??= new StructureDraft();
+        draft.Clear();
         int graphHydrogen = GraphHydrogen(molecule, path[0]);
         for (int i = 0; i < molecule.AtomCount; i++)
         {

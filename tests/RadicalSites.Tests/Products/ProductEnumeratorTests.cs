@@ -44,6 +44,27 @@ public class ProductEnumeratorTests
         Assert.Equal(wanted, actual);
     }
 
+    // Stereo outcome of the transposed products alone, in the order of their SMILES.
+    [Theory]
+    [InlineData("CC=C", "")]
+    [InlineData("CC(C)=CC", "Racemic None")]
+    [InlineData("CCC=C(C)C", "Racemic Diastereomers")]
+    [InlineData("CN(C)CCC=C1c2ccccc2CCc2ccccc12", "Diastereomers")]
+    [InlineData("CC1=CCCCC1", "Racemic Racemic")]
+    [InlineData("CC1=CC(C)CCC1", "Diastereomers Diastereomers")]
+    [InlineData("C[C@H](O)CC=C", "Diastereomers")]
+    [InlineData("CC=C(C)C", "Racemic None")]
+    [InlineData("C=CC=CC", "None")]
+    public void Enumerate_transposed_products_have_the_outcome_worked_out_by_hand(string smiles, string expected)
+    {
+        string actual = string.Join(' ', ProductEnumerator.Enumerate(SiteFinder.Find(SmilesReader.Parse(smiles)), 17).Products
+            .Where(static product => product.Route == ProductRoute.Transposed)
+            .OrderBy(static product => product.CanonicalSmiles, StringComparer.Ordinal)
+            .Select(static product => product.Stereo));
+
+        Assert.Equal(expected, actual);
+    }
+
     [Theory]
     [InlineData("CC1CCC2(C)C(CCC3C2CC=C2CC(O)CCC32C)C1")]
     [InlineData("CC(=O)Oc1ccccc1C(=O)OCC=C")]
