@@ -28,7 +28,7 @@ internal static class CagePaths
         List<int> near = Ball(graph, atom, 4);
         foreach (int other in near)
         {
-            if (other != atom && graph.DegreeOf(other) >= 3 && graph.WeightBetween(atom, other) == 0
+            if (other != atom && graph.RingBondsOf(other) >= 3 && graph.WeightBetween(atom, other) == 0
                 && TryFind(graph, near, atom, other, out _, out _))
             {
                 return true;
@@ -43,6 +43,11 @@ internal static class CagePaths
     /// </summary>
     internal static int Relation(SymmetryGraph graph, int first, int second)
     {
+        if (graph.RingBondsOf(first) < 3 || graph.RingBondsOf(second) < 3)
+        {
+            return 0;
+        }
+
         int one = graph.CenterAt[first] - 1;
         int two = graph.CenterAt[second] - 1;
         List<int> near = Ball(graph, first, LongestBridge);

@@ -5,13 +5,14 @@ namespace RadicalSites.Symmetry;
 
 /// <summary>
 /// Finds frames that can always be turned over on the spot, because two of their ligands are like branches that hold no
-/// configuration of their own: isopropyl, gem-dialkyl, sulfonyl. Such a frame never restricts the rest of the molecule.
+/// configuration of their own: isopropyl, gem-dialkyl, sulfonyl; or
+/// because a ring that holds none turns over with it: cyclohexyl. Such a frame never restricts the rest of the molecule.
 /// </summary>
 /// <remarks>Not thread-safe: one belongs to each workspace.</remarks>
-internal sealed class FlexibleFrames
+internal sealed partial class FlexibleFrames
 {
-    private readonly Stack<int> open = new();
     private readonly List<int> branch = [];
+    private SymmetryWorkspace workspace = null!;
     private SymmetryGraph graph = new();
     private ColorPartition cells = new();
     private int[] orbits = [];
@@ -35,6 +36,7 @@ internal sealed class FlexibleFrames
     /// <param name="constitutional">Constitutional orbit by atom.</param>
     internal void Find(SymmetryWorkspace workspace, int[] constitutional)
     {
+        this.workspace = workspace;
         graph = workspace.Graph;
         cells = workspace.Constitution;
         orbits = constitutional;
@@ -93,132 +95,11 @@ internal sealed class FlexibleFrames
     {
         if (State[element] == 0)
         {
-            // Guards against going round; a frame inside its own branch cannot occur in a tree-like branch.
+            // Frames of one ring that depend on each other stay rigid: the one looked at first stands in the way.
             State[element] = -1;
             State[element] = HasLikeBranches(element) ? (sbyte)1 : (sbyte)-1;
         }
 
         return State[element] > 0;
-    }
-
-    private bool HasLikeBranches(int element)
-    {
-        ReadOnlySpan<int> carriers = graph.Carriers.AsSpan(4 * element, 4);
-        bool paired = graph.Kind[element] != SymmetryGraph.Center;
-        for (int i = 0; i < 4; i++)
-        {
-            int one = carriers[i];
-            for (int j = i + 1; j < 4 && one >= 0; j++)
-            {
-                int two = carriers[j];
-                if (two >= 0 && orbits[one] == orbits[two] && (!paired || i / 2 == j / 2)
-                    && MarkBranches(one, StemOf(element, one, two), graph.Kind[element] == SymmetryGraph.Axis ? 2 : 1))
-                {
-                    return true;
-                }
-            }
-        }
-
-        return false;
-    }
-
-    /// <summary>The atom that carries both ligands.</summary>
-    private int StemOf(int element, int one, int two)
-    {
-        if (graph.Kind[element] == SymmetryGraph.Center)
-        {
-            return graph.Focus[element];
-        }
-
-        for (int i = graph.Offset[one]; i < graph.Offset[one + 1]; i++)
-        {
-            if (graph.WeightBetween(graph.Adjacent[i], two) != 0)
-            {
-                return graph.Adjacent[i];
-            }
-        }
-
-        return -1;
-    }
-
-    /// <summary>Counts all like branches of a stem as movable when they come back nowhere and hold no rigid frame.</summary>
-    private bool MarkBranches(int root, int stem, int weight)
-    {
-        if (stem < 0 || !WalkBranch(root, stem))
-        {
-            return false;
-        }
-
-        for (int i = graph.Offset[stem]; i < graph.Offset[stem + 1]; i++)
-        {
-            int other = graph.Adjacent[i];
-            if (orbits[other] == orbits[root] && WalkBranch(other, stem))
-            {
-                foreach (int atom in branch)
-                {
-                    Depth[atom] += weight;
-                }
-            }
-        }
-
-        return true;
-    }
-
-    /// <summary>Collects what hangs on the stem through an atom; fails when it comes back or holds a rigid frame.</summary>
-    private bool WalkBranch(int root, int stem)
-    {
-        branch.Clear();
-        branch.Add(root);
-        if (graph.DegreeOf(root) == 1)
-        {
-            return true;
-        }
-
-        open.Clear();
-        open.Push(root);
-        int own = ++mark;
-        seen[root] = own;
-        while (open.TryPop(out int atom))
-        {
-            for (int i = graph.Offset[atom]; i < graph.Offset[atom + 1]; i++)
-            {
-                int next = graph.Adjacent[i];
-                if (next == stem)
-                {
-                    if (atom != root)
-                    {
-                        return false;
-                    }
-                }
-                else if (seen[next] != own)
-                {
-                    seen[next] = own;
-                    branch.Add(next);
-                    open.Push(next);
-                }
-            }
-        }
-
-        return HoldsNoRigidFrame([.. branch]);
-    }
-
-    private bool HoldsNoRigidFrame(ReadOnlySpan<int> atoms)
-    {
-        bool any = false;
-        foreach (int atom in atoms)
-        {
-            int center = graph.CenterAt[atom] - 1;
-            int axis = graph.AxisAt[atom] - 1;
-            any |= (center >= 0 && !IsFlexible(center)) || (axis >= 0 && !IsFlexible(axis));
-        }
-
-        // The frames inside were looked at with the same scratch list.
-        branch.Clear();
-        foreach (int atom in atoms)
-        {
-            branch.Add(atom);
-        }
-
-        return !any;
     }
 }

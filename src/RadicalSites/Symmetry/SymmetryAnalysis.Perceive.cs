@@ -30,7 +30,7 @@ public sealed partial class SymmetryAnalysis
         if (graph.ElementCount == 0)
         {
             workspace.Topicity.BeginPlain(workspace, molecule);
-            workspace.Topicity.FindHydrogens(hydrogens);
+            workspace.Topicity.FindHydrogens(hydrogens, workspace.ConstitutionalOrbits);
         }
         else
         {
@@ -71,7 +71,7 @@ public sealed partial class SymmetryAnalysis
             readings?[r].CopyTo(graph.Configuration, 0);
             topicity.Begin(workspace, molecule, stated, constitutional);
             topicity.FindOrbits();
-            topicity.FindHydrogens(hydrogens);
+            topicity.FindHydrogens(hydrogens, workspace.MirrorOrbits);
             enantiotopic = Meet(enantiotopic, workspace.MirrorOrbits);
             homotopic = Meet(homotopic, workspace.ProperOrbits);
         }

@@ -62,20 +62,20 @@ internal sealed partial class SymmetryGraph
     /// </summary>
     internal bool IsHeldByRings(int atom)
     {
-        if (DegreeOf(atom) < 3)
+        int ringBonds = RingBondsOf(atom);
+        if (DegreeOf(atom) < 3 || ringBonds < 2)
         {
             return false;
         }
 
-        int at = Offset[atom];
-        for (int i = 0; i < DegreeOf(atom); i++)
+        for (int i = Offset[atom]; i < Offset[atom + 1]; i++)
         {
-            if (ShortestRing(atom, Adjacent[at + i], 4) == 3)
+            if (InRing[i] && ShortestRing(atom, Adjacent[i], 4) == 3)
             {
                 return true;
             }
         }
 
-        return DegreeOf(atom) == 3 && CagePaths.IsBridgehead(this, atom);
+        return ringBonds == 3 && CagePaths.IsBridgehead(this, atom);
     }
 }

@@ -19,6 +19,9 @@ internal sealed partial class SymmetryGraph
     internal int[] Offset = new int[65];
     internal int[] Adjacent = new int[160];
     internal int[] Weight = new int[160];
+
+    /// <summary>Whether the bond of each entry of <see cref="Adjacent"/> lies on a ring; filled for whole molecules.</summary>
+    internal bool[] InRing = new bool[160];
     internal ulong[] Key = new ulong[64];
 
     /// <summary>Fills atoms and bonds; stereo elements are left empty.</summary>
@@ -32,11 +35,14 @@ internal sealed partial class SymmetryGraph
         ReadOnlySpan<Bond> bonds = molecule.BondSpan;
         int[] adjacent = Adjacent;
         int[] weight = Weight;
+        bool[] inRing = InRing;
         for (int i = 0; i < neighbors.Length; i++)
         {
             Neighbor neighbor = neighbors[i];
             adjacent[i] = neighbor.Atom;
-            weight[i] = WeightOf(bonds[neighbor.Bond]);
+            ref readonly Bond bond = ref bonds[neighbor.Bond];
+            weight[i] = WeightOf(bond);
+            inRing[i] = bond.IsInRing;
         }
 
         ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
@@ -51,6 +57,18 @@ internal sealed partial class SymmetryGraph
     }
 
     internal int DegreeOf(int atom) => Offset[atom + 1] - Offset[atom];
+
+    /// <summary>Number of bonds of an atom that lie on rings.</summary>
+    internal int RingBondsOf(int atom)
+    {
+        int count = 0;
+        for (int i = Offset[atom]; i < Offset[atom + 1]; i++)
+        {
+            count += InRing[i] ? 1 : 0;
+        }
+
+        return count;
+    }
 
     /// <summary>Weight of the bond between two atoms, or 0 when there is none.</summary>
     internal int WeightBetween(int first, int second)
@@ -110,6 +128,7 @@ internal sealed partial class SymmetryGraph
             int size = Math.Max(ends, 2 * Adjacent.Length);
             Adjacent = new int[size];
             Weight = new int[size];
+            InRing = new bool[size];
         }
     }
 }

@@ -6,13 +6,23 @@ namespace RadicalSites.Symmetry;
 internal sealed partial class TopicitySearch
 {
     /// <summary>Relates the hydrogens on each atom; a weaker relation found before stays.</summary>
-    internal void FindHydrogens(Span<Topicity> hydrogens)
+    /// <param name="hydrogens">Relation by atom.</param>
+    /// <param name="orbits">Classes of atoms that are enantiotopic or better.</param>
+    internal void FindHydrogens(Span<Topicity> hydrogens, OrbitForest orbits)
     {
         ReadOnlySpan<Atom> atoms = molecule.AtomSpan;
         for (int i = 0; i < atoms.Length; i++)
         {
-            Topicity found = atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 2 ? OfMethylene(i)
-                : atoms[i].HydrogenCount == 2 && graph.DegreeOf(i) == 1 ? OfTerminal(i)
+            if (atoms[i].HydrogenCount != 2)
+            {
+                continue;
+            }
+
+            // Equivalent atoms, mirrored or not, have the same answer; the root of a class has the lowest index.
+            int root = orbits.Find(i);
+            Topicity found = root != i ? hydrogens[root]
+                : graph.DegreeOf(i) == 2 ? OfMethylene(i)
+                : graph.DegreeOf(i) == 1 ? OfTerminal(i)
                 : Topicity.Homotopic;
             hydrogens[i] = found > hydrogens[i] ? found : hydrogens[i];
         }

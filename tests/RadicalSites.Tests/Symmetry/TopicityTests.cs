@@ -39,6 +39,13 @@ public sealed class TopicityTests
     [InlineData("C1CC2CCC1C2", 0, Topicity.Diastereotopic)] // exo and endo
     [InlineData("C1CC1C", 0, Topicity.Diastereotopic)] // cis and trans to the methyl
     [InlineData("CC1CCC(C)CC1", 2, Topicity.Diastereotopic)]
+    [InlineData("OC1CCCCC1", 2, Topicity.Diastereotopic)] // cis and trans to the hydroxyl, on every carbon of the ring
+    [InlineData("OC1CCCCC1", 4, Topicity.Diastereotopic)]
+    [InlineData("C1CCCCC1NC1CCCCC1", 2, Topicity.Diastereotopic)]
+    [InlineData("O=C1CCCCC1", 4, Topicity.Homotopic)]
+    [InlineData("O=C1CCCCC1", 3, Topicity.Enantiotopic)]
+    [InlineData("CC1(C)CCCCC1", 5, Topicity.Homotopic)]
+    [InlineData("CC1(O)CCCCC1", 5, Topicity.Diastereotopic)]
     [InlineData("C=CC", 0, Topicity.Diastereotopic)]
     [InlineData("C=C(C)C", 0, Topicity.Homotopic)]
     [InlineData("C=C", 0, Topicity.Homotopic)]
