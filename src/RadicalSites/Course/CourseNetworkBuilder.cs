@@ -6,11 +6,13 @@ using RadicalSites.Molecules;
 
 namespace RadicalSites.Course;
 
-/// <summary>Grows the network level by level, following what can matter and sending the rest to counted sinks.</summary>
+/// <summary>Grows the network level by level, following what can matter and pooling the rest by halogen count.</summary>
 /// <remarks>
 /// The part of the substrate that ever passes through a species is the sum over its parents of their passage times
-/// the branch to it; it is known exactly before the species is expanded. Species below the threshold, beyond the limit
-/// or beyond the highest halogen count end in a sink of their halogen count, so mass and halogen stay accounted for.
+/// the branch to it; it is known exactly before the species is expanded. Species below the threshold or beyond the limit
+/// are pooled by halogen count; a pool reacts on as the mean of the followed species with as many halogens (of the last
+/// level that has any), so mass and halogen stay accounted for. What goes beyond the highest halogen count stays in the
+/// last pool.
 /// </remarks>
 internal sealed class CourseNetworkBuilder
 {
@@ -18,7 +20,7 @@ internal sealed class CourseNetworkBuilder
     private readonly Func<string, IReadOnlyDictionary<string, double>, MeasuredRate?> measured;
     private readonly CourseOptions options;
     private readonly List<CourseSpecies> species = [];
-    private readonly List<(int From, string? To, int SinkHalogens, double Rate)> steps = [];
+    private readonly List<(int From, string? To, int Halogens, double Rate)> steps = [];
     private readonly Dictionary<string, int> indices = new(StringComparer.Ordinal);
     private readonly Dictionary<string, double> rates = new(StringComparer.Ordinal);
     private bool limitReached;
@@ -40,7 +42,7 @@ internal sealed class CourseNetworkBuilder
     {
         var level = new List<Candidate> { new(canonicalSmiles, substrate) { Passage = 1 } };
         double unit = 0;
-        for (int halogens = 0; halogens <= options.MaximumHalogens && level.Count > 0; halogens++)
+        for (int halogens = 0; halogens <= options.HalogensFollowed && level.Count > 0; halogens++)
         {
             // Levels only ever lead to the next one, so numbering by level is a topological order.
             level.Sort(static (left, right) =>
@@ -96,7 +98,7 @@ internal sealed class CourseNetworkBuilder
         });
         foreach (SpeciesReaction product in reactions.Products)
         {
-            bool beyond = halogens == options.MaximumHalogens;
+            bool beyond = halogens == options.HalogensFollowed;
             steps.Add((index, beyond ? null : product.CanonicalSmiles, halogens + 1, product.Rate * scale));
             if (!beyond)
             {
@@ -113,35 +115,67 @@ internal sealed class CourseNetworkBuilder
 
     private CourseNetwork Finish(double unit)
     {
-        var sinkOfHalogens = new SortedDictionary<int, int>();
-        var finished = new Dictionary<(int From, int To), double>();
-        foreach ((int from, string? to, int halogens, double rate) in steps)
+        int lowestPool = options.HalogensFollowed + 1;
+        foreach ((int _, string? to, int halogens, double _) in steps)
         {
             if (to is null || !indices.ContainsKey(to))
             {
-                sinkOfHalogens.TryAdd(halogens, 0);
+                lowestPool = Math.Min(lowestPool, halogens);
             }
         }
 
-        int[] sinks = [.. sinkOfHalogens.Keys];
-        for (int i = 0; i < sinks.Length; i++)
-        {
-            sinkOfHalogens[sinks[i]] = species.Count + i;
-        }
-
+        int[] pools = steps.Exists(step => step.To is null || !indices.ContainsKey(step.To))
+            ? [.. Enumerable.Range(lowestPool, options.HalogensFollowed + 2 - lowestPool)]
+            : [];
+        var finished = new Dictionary<(int From, int To), double>();
         foreach ((int from, string? to, int halogens, double rate) in steps)
         {
-            int target = to is not null && indices.TryGetValue(to, out int index) ? index : sinkOfHalogens[halogens];
+            int target = to is not null && indices.TryGetValue(to, out int index)
+                ? index
+                : species.Count + halogens - lowestPool;
             finished[(from, target)] = finished.GetValueOrDefault((from, target)) + (rate / unit);
+        }
+
+        for (int i = 0; i + 1 < pools.Length; i++)
+        {
+            if (MeanRate(pools[i]) is > 0 and double mean)
+            {
+                finished[(species.Count + i, species.Count + i + 1)] = mean / unit;
+            }
         }
 
         return new CourseNetwork
         {
             Species = [.. species.Select(one => one with { RelativeRate = unit == 0 ? 0 : one.RelativeRate / unit })],
-            SinkHalogens = sinks,
+            PoolHalogens = pools,
             Steps = [.. finished.Select(static step => (step.Key.From, step.Key.To, step.Value))],
             LimitReached = limitReached,
         };
+    }
+
+    // Mean over what passes through the followed species of a level, or of the last level below that has any.
+    private double MeanRate(int halogens)
+    {
+        for (int level = halogens; level > 0; level--)
+        {
+            double passage = 0;
+            double sum = 0;
+            foreach (CourseSpecies one in species)
+            {
+                if (one.HalogenCount == level)
+                {
+                    passage += one.Passage;
+                    sum += one.Passage * one.RelativeRate;
+                }
+            }
+
+            if (passage > 0)
+            {
+                return sum / passage;
+            }
+        }
+
+        return 0;
     }
 
     private sealed class Candidate(string smiles, Molecule molecule)

@@ -10,8 +10,12 @@ public sealed record CourseOptions
     /// <summary>Number of points of the curve, both ends included, 2 to 10 001; 61 by default.</summary>
     public int PointCount { get; init; } = 61;
 
-    /// <summary>Most halogens per molecule that are followed, 1 to 64; 4 by default.</summary>
-    public int MaximumHalogens { get; init; } = 4;
+    /// <summary>
+    /// Most halogens per molecule that are followed, 1 to 64; by default two more than the equivalents, rounded up.
+    /// </summary>
+    public int? MaximumHalogens { get; init; }
+
+    internal int HalogensFollowed => MaximumHalogens ?? (int)System.Math.Min(64, System.Math.Ceiling(MaximumEquivalents) + 2);
 
     /// <summary>Most species that are followed, 2 to 2000; 300 by default. Time grows with the cube.</summary>
     public int SpeciesLimit { get; init; } = 300;

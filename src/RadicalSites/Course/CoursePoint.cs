@@ -18,9 +18,15 @@ public sealed record CoursePoint
     /// <summary>Amount of each species [mol per mol substrate], in the order of the species.</summary>
     public required IReadOnlyList<double> Amounts { get; init; }
 
-    /// <summary>Amounts summed by halogens added [mol per mol substrate]; index 0 is the substrate, 1 all mono products.</summary>
+    /// <summary>
+    /// Amounts summed by halogens added [mol per mol substrate], species that are not followed included; index 0 is the
+    /// substrate, 1 all mono products; the last entry holds that many halogens or more.
+    /// </summary>
     public required IReadOnlyList<double> AmountsByHalogenCount { get; init; }
 
-    /// <summary>Substrate turned into species that are not followed, 0 to 1; they carry at least as many halogens as counted.</summary>
+    /// <summary>
+    /// Substrate turned into species that are not followed one by one, 0 to 1. Such a species reacts on as the mean of the
+    /// followed ones with as many halogens.
+    /// </summary>
     public required double Truncated { get; init; }
 }

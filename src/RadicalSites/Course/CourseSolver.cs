@@ -15,9 +15,9 @@ internal static class CourseSolver
         CourseNetwork network, CourseOptions options)
     {
         int speciesCount = network.Species.Count;
-        int total = speciesCount + network.SinkHalogens.Count;
+        int total = speciesCount + network.PoolHalogens.Count;
         int[] halogens =
-            [.. network.Species.Select(static species => species.HalogenCount), .. network.SinkHalogens];
+            [.. network.Species.Select(static species => species.HalogenCount), .. network.PoolHalogens];
         var propagator = new ExposurePropagator(total, network.Steps);
         double[] start = new double[total];
         start[0] = 1;
@@ -58,18 +58,12 @@ internal static class CourseSolver
         CourseNetwork network, int[] halogens, double[] state, double exposure, double equivalents)
     {
         int speciesCount = network.Species.Count;
-        double[] byCount = new double[1 + network.Species.Max(static species => species.HalogenCount)];
+        double[] byCount = new double[1 + halogens.Max()];
         double truncated = 0;
         for (int i = 0; i < state.Length; i++)
         {
-            if (i < speciesCount)
-            {
-                byCount[halogens[i]] += state[i];
-            }
-            else
-            {
-                truncated += state[i];
-            }
+            byCount[halogens[i]] += state[i];
+            truncated += i < speciesCount ? 0 : state[i];
         }
 
         return new CoursePoint

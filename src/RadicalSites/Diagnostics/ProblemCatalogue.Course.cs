@@ -18,7 +18,7 @@ public static partial class ProblemCatalogue
         /// <summary>The network was cut.</summary>
         public static readonly ProblemDescriptor Truncated = new(
             "course-truncated", Severity.Caution, "Part of the mixture is not followed",
-            "At the end of the curve {0:P2} of the substrate has become species that are not followed; they are counted with the fewest halogens they can have.",
+            "At the end of the curve {0:P2} of the substrate has become species that are not followed one by one; they react on as the mean of the followed ones with as many halogens.",
             "The limits on species, on halogens per molecule or on the passage cut the network.",
             "Raise the limits, or stop the curve at fewer equivalents.");
 
