@@ -95,7 +95,7 @@ internal sealed partial class SmilesParse
             StereoKind.Octahedral => 6,
             _ => 4,
         };
-        if (mark.Count == expected - 1 && mark.Count >= 3)
+        if (mark.Count == expected - 1 && mark.Count >= 3 && MayHaveLonePair(draft.Atoms[atom]))
         {
             // A lone pair takes the place of an implicit hydrogen: right after the atom before the centre.
             int place = mark.Carriers[0] >= 0 && mark.Carriers[0] < atom && HasBond(atom, mark.Carriers[0], atom) ? 1 : 0;
@@ -131,6 +131,9 @@ internal sealed partial class SmilesParse
 
         return true;
     }
+
+    private static bool MayHaveLonePair(in BuilderAtom atom) =>
+        atom.Element is 7 or 15 or 16 or 33 or 34 or 51 or 52 || atom.Charge < 0 || atom.Element > 18;
 
     private bool HasBond(int begin, int end, int before)
     {
