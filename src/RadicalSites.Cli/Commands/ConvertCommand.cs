@@ -1,8 +1,8 @@
 using System.CommandLine;
-using System.Globalization;
 using RadicalSites.Canonical;
 using RadicalSites.Cli.Pipeline;
 using RadicalSites.Formats.Smiles;
+using RadicalSites.Thermochemistry;
 
 namespace RadicalSites.Cli.Commands;
 
@@ -21,16 +21,14 @@ internal static class ConvertCommand
         {
             PipelineOptions options = records.Read(parsed, host);
             bool canonical = parsed.GetValue(order) == "canonical";
-            return RecordOptions.Run(
-                host, options,
-                record => record.Molecule is null
-                    ? Renderer.Failure(record, options)
-                    : new Rendered(
-                        Renderer.Text(writer => writer.Write(string.Create(
-                            CultureInfo.InvariantCulture,
-                            $"{(canonical ? CanonicalSmiles.Write(record.Molecule) : SmilesWriter.Write(record.Molecule))}{(record.Source.Name is null ? "" : "\t" + record.Source.Name)}\n"))),
-                        record, null),
-                "");
+            var plan = new OutputPlan("", () => new LineRecordWriter((output, source, molecule) =>
+            {
+                output.Append(canonical ? CanonicalSmiles.Write(molecule) : SmilesWriter.Write(molecule));
+                output.Append(source.Name is null ? "" : "\t" + source.Name);
+                output.Append((byte)'\n');
+                return true;
+            }));
+            return new RecordRun(host, options, plan, BdeTable.Default.Version).Run();
         });
         return command;
     }

@@ -2,12 +2,12 @@ using System;
 using System.CommandLine;
 using System.Globalization;
 using System.IO;
-using System.Text.Json;
+using RadicalSites.Canonical;
 using RadicalSites.Cli.Pipeline;
-using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
 using RadicalSites.Products;
 using RadicalSites.Reporting;
+using RadicalSites.Thermochemistry;
 
 namespace RadicalSites.Cli.Commands;
 
@@ -23,7 +23,7 @@ internal static class IsomersCommand
         halogen.AcceptOnlyFromAmong("F", "Cl", "Br", "I");
         var times = new Option<int>("--times") { Description = "Replace 1 to this many hydrogens.", DefaultValueFactory = static _ => 1 };
         var exactly = new Option<bool>("--exactly") { Description = "Only products with exactly --times halogens." };
-        var most = new Option<long>("--most") { Description = "List at most this many products of a molecule.", DefaultValueFactory = static _ => 1_000_000 };
+        var most = new Option<long>("--most") { Description = "List at most this many products of a molecule; exit code 4 when there are more.", DefaultValueFactory = static _ => 1_000_000 };
         records.AddTo(command);
         chemistry.AddStereo(command);
         foreach (Option option in (Option[])[halogen, times, exactly, most])
@@ -48,55 +48,47 @@ internal static class IsomersCommand
                 Stereo = chemistry.ReadStereo(parsed),
             };
             long limit = parsed.GetValue(most);
-            return RecordOptions.Run(
-                host, options, record => Render(record, options, isomerOptions, limit, host),
-                options.Format == OutputFormat.Csv ? CsvReport.IsomerHeader + "\n" : "");
+            OutputPlan plan = Plan(options, molecule => IsomerEnumeration.Of(molecule, isomerOptions, host.Cancellation), limit);
+            return new RecordRun(host, options, plan, BdeTable.Default.Version).Run();
         });
         return command;
     }
 
-    private static Rendered Render(
-        InputRecord record, PipelineOptions options, IsomerOptions isomerOptions, long limit, ToolHost host)
+    private static OutputPlan Plan(PipelineOptions options, Func<Molecule, IsomerEnumeration> enumerate, long limit) => options.Format switch
     {
-        if (record.Molecule is null)
-        {
-            return Renderer.Failure(record, options);
-        }
+        OutputFormat.Csv => new OutputPlan(CsvReport.Header(CsvShape.Isomers) + "\n", () => new CsvRecordWriter(
+            CsvShape.Isomers,
+            (output, source, molecule) =>
+                CsvReport.Write(output, source, CanonicalSmiles.Write(molecule), enumerate(molecule), limit))),
+        OutputFormat.Table => new OutputPlan("", () => new TextRecordWriter(
+            options.IsSingle, (writer, _, molecule) => WriteTable(writer, enumerate(molecule), limit))),
+        OutputFormat.Smi => new OutputPlan("", () => new LineRecordWriter(
+            (output, source, molecule) => Each(enumerate(molecule), limit, isomer => output.Append(string.Create(
+                CultureInfo.InvariantCulture, $"{isomer.CanonicalSmiles}\t{isomer.Degeneracy}\t{source.Name}\n"))))),
+        _ => new OutputPlan("", () => new JsonRecordWriter(
+            options.IsIndented,
+            (writer, source, molecule) => JsonReport.Write(
+                writer, source, CanonicalSmiles.Write(molecule), BdeTable.Default.Version, enumerate(molecule), limit))),
+    };
 
-        IsomerEnumeration enumeration = IsomerEnumeration.Of(record.Molecule, isomerOptions, host.Cancellation);
-        byte[] bytes = options.Format switch
-        {
-            OutputFormat.Json or OutputFormat.Ndjson => Renderer.Json(
-                Renderer.Indented(options), writer => WriteJson(writer, record, enumeration, limit)),
-            OutputFormat.Csv => Renderer.Text(writer => Each(enumeration, limit, isomer => CsvReport.Write(writer, record.Source, isomer))),
-            OutputFormat.Smi => Renderer.Text(writer => Each(enumeration, limit, isomer =>
-                writer.Write(string.Create(CultureInfo.InvariantCulture, $"{isomer.CanonicalSmiles}\t{isomer.Degeneracy}\t{record.Source.Name}\n")))),
-            _ => Renderer.Text(writer => WriteTable(writer, record, enumeration, limit)),
-        };
-        return new Rendered(bytes, record, null);
-    }
-
-    private static long Each(IsomerEnumeration enumeration, long limit, Action<IsomerProduct> use)
+    private static bool Each(IsomerEnumeration enumeration, long limit, Action<IsomerProduct> use)
     {
-        long count = 0;
         foreach (IsomerProduct isomer in enumeration.Enumerate())
         {
-            if (count == limit)
+            if (isomer.Number > limit)
             {
-                return -1;
+                return false;
             }
 
-            count++;
             use(isomer);
         }
 
-        return count;
+        return true;
     }
 
-    private static void WriteTable(TextWriter writer, InputRecord record, IsomerEnumeration enumeration, long limit)
+    private static bool WriteTable(TextWriter writer, IsomerEnumeration enumeration, long limit)
     {
-        Renderer.Separate(writer, record);
-        long count = Each(enumeration, limit, isomer =>
+        bool complete = Each(enumeration, limit, isomer =>
         {
             writer.Write(string.Create(CultureInfo.InvariantCulture, $"{isomer.CanonicalSmiles}\t{isomer.Degeneracy}\n"));
             if (isomer.Stereoisomers is { } stereoisomers)
@@ -107,47 +99,8 @@ internal static class IsomersCommand
                 }
             }
         });
-        if (count < 0)
-        {
-            writer.Write(ProblemCatalogue.General.LimitReached.Format(limit, "products") + "\n");
-        }
-
-        TextReport.Remarks(writer, enumeration.Diagnostics);
-    }
-
-    private static void WriteJson(Utf8JsonWriter writer, InputRecord record, IsomerEnumeration enumeration, long limit)
-    {
-        JsonReport.Begin(writer, record.Source, "ok");
-        writer.WriteStartArray("isomers");
-        long count = Each(enumeration, limit, isomer =>
-        {
-            writer.WriteStartObject();
-            writer.WriteNumber("isomer", isomer.Number);
-            writer.WriteString("smiles", isomer.CanonicalSmiles);
-            writer.WriteString("degeneracy", isomer.Degeneracy.ToString(CultureInfo.InvariantCulture));
-            writer.WriteStartArray("halogenCarbons");
-            foreach (int carbon in isomer.HalogenCarbons)
-            {
-                writer.WriteNumberValue(record.Molecule!.InputIndexOf(carbon));
-            }
-
-            writer.WriteEndArray();
-            if (isomer.Stereoisomers is { } stereoisomers)
-            {
-                writer.WriteStartArray("stereoisomers");
-                foreach (string stereoisomer in stereoisomers)
-                {
-                    writer.WriteStringValue(stereoisomer);
-                }
-
-                writer.WriteEndArray();
-            }
-
-            writer.WriteEndObject();
-        });
-        writer.WriteEndArray();
-        writer.WriteBoolean("complete", count >= 0);
-        JsonReport.WriteDiagnostics(writer, record.Molecule!, enumeration.Diagnostics);
-        writer.WriteEndObject();
+        TextReport.Remarks(
+            writer, complete ? enumeration.Diagnostics : [.. enumeration.Diagnostics, JsonReport.ProductLimit(limit)]);
+        return complete;
     }
 }

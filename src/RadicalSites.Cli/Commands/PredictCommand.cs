@@ -1,5 +1,6 @@
 using System.CommandLine;
 using RadicalSites.Cli.Pipeline;
+using RadicalSites.Products;
 using RadicalSites.Reporting;
 
 namespace RadicalSites.Cli.Commands;
@@ -10,43 +11,62 @@ internal static class PredictCommand
     internal static Command Build(ToolHost host)
     {
         var command = new Command("predict", "Shares of the sites with 90 % intervals, products, remarks, for one reagent and temperature.");
-        var records = new RecordOptions("table", "json", "ndjson", "csv");
+        var records = new RecordOptions("table", "json", "ndjson", "csv", "smi");
         var chemistry = new ChemistryOptions();
+        var rows = new Option<string>("--rows")
+        {
+            Description = "Rows of CSV: sites or products.",
+            DefaultValueFactory = static _ => "sites",
+        };
+        rows.AcceptOnlyFromAmong("sites", "products");
         records.AddTo(command);
         chemistry.AddReaction(command);
         chemistry.AddStereo(command);
         chemistry.AddData(command);
+        command.Options.Add(rows);
         command.SetAction(parsed =>
         {
             PipelineOptions options = records.Read(parsed, host);
             var predictor = new HalogenationPredictor(
                 chemistry.ReadConditions(parsed), chemistry.ReadOptions(parsed, withStereo: true));
-            return RecordOptions.Run(
-                host, options, record => Render(record, options, predictor),
-                options.Format == OutputFormat.Csv ? CsvReport.SiteHeader + "\n" : "");
+            CsvShape shape = parsed.GetValue(rows) == "sites" ? CsvShape.PredictedSites : CsvShape.Products;
+            return new RecordRun(host, options, Plan(options, predictor, shape), predictor.Options.Table.Version).Run();
         });
         return command;
     }
 
-    private static Rendered Render(InputRecord record, PipelineOptions options, HalogenationPredictor predictor)
+    private static OutputPlan Plan(PipelineOptions options, HalogenationPredictor predictor, CsvShape shape) => options.Format switch
     {
-        if (record.Molecule is null)
-        {
-            return Renderer.Failure(record, options);
-        }
-
-        Prediction prediction = predictor.Predict(record.Molecule);
-        byte[] bytes = options.Format switch
-        {
-            OutputFormat.Json or OutputFormat.Ndjson => Renderer.Json(
-                Renderer.Indented(options), writer => JsonReport.Write(writer, record.Source, prediction)),
-            OutputFormat.Csv => Renderer.Text(writer => CsvReport.Write(writer, record.Source, prediction)),
-            _ => Renderer.Text(writer =>
+        OutputFormat.Csv => new OutputPlan(CsvReport.Header(shape) + "\n", () => new CsvRecordWriter(
+            shape,
+            (output, source, molecule) =>
             {
-                Renderer.Separate(writer, record);
-                TextReport.Write(writer, record.Source, prediction);
-            }),
-        };
-        return new Rendered(bytes, record, null);
-    }
+                CsvReport.Write(output, source, predictor.Predict(molecule), shape);
+                return true;
+            })),
+        OutputFormat.Table => new OutputPlan("", () => new TextRecordWriter(
+            options.IsSingle,
+            (writer, source, molecule) =>
+            {
+                TextReport.Write(writer, source, predictor.Predict(molecule));
+                return true;
+            })),
+        OutputFormat.Smi => new OutputPlan("", () => new LineRecordWriter(
+            (output, source, molecule) =>
+            {
+                foreach (HalogenationProduct product in predictor.Predict(molecule).Products)
+                {
+                    output.AppendLine(product.CanonicalSmiles, product.Share, source.Name);
+                }
+
+                return true;
+            })),
+        _ => new OutputPlan("", () => new JsonRecordWriter(
+            options.IsIndented,
+            (writer, source, molecule) =>
+            {
+                JsonReport.Write(writer, source, predictor.Predict(molecule));
+                return true;
+            })),
+    };
 }

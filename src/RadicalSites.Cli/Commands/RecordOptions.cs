@@ -1,7 +1,9 @@
 using System;
+using System.Collections.Generic;
 using System.CommandLine;
 using System.Globalization;
-using System.Text;
+using System.Linq;
+using RadicalSites.Cli.Input;
 using RadicalSites.Cli.Pipeline;
 
 namespace RadicalSites.Cli.Commands;
@@ -15,7 +17,12 @@ internal sealed class RecordOptions
         Arity = ArgumentArity.ZeroOrMore,
     };
 
+    private static readonly Dictionary<string, RecordFormat> FormatNames = new() { ["smi"] = RecordFormat.Smiles };
+
+    private readonly string[] formats;
     private readonly Option<string> format;
+
+    private readonly Option<string?> inputFormat = new("--input-format") { Description = "Format of inputs whose name does not say it." };
 
     private readonly Option<string?> output = new("--output") { Description = "Write to this file; it appears under its name when complete." };
     private readonly Option<string> onError = new("--on-error")
@@ -24,7 +31,7 @@ internal sealed class RecordOptions
         DefaultValueFactory = static _ => "continue",
     };
 
-    private readonly Option<int> threads = new("--threads") { Description = "Threads; 0 = one for each core.", DefaultValueFactory = static _ => 1 };
+    private readonly Option<int> threads = new("--threads") { Description = "Threads; 0 = one for each core. The output does not depend on it." };
     private readonly Option<long?> limit = new("--limit") { Description = "Stop after this many records (exit code 4 when there are more)." };
     private readonly Option<string?> shard = new("--shard") { Description = "Part K of N by record number, as K/N; outputs joined in order equal one run." };
     private readonly Option<bool> resume = new("--resume") { Description = "Go on after the last complete record of an interrupted run with --output." };
@@ -33,6 +40,8 @@ internal sealed class RecordOptions
 
     internal RecordOptions(params string[] formats)
     {
+        this.formats = formats;
+        inputFormat.AcceptOnlyFromAmong([.. FormatNames.Keys]);
         format = new Option<string>("--format")
         {
             Description = "Output: " + string.Join(", ", formats) + ".",
@@ -45,7 +54,7 @@ internal sealed class RecordOptions
     internal void AddTo(Command command)
     {
         command.Arguments.Add(inputs);
-        foreach (Option option in (Option[])[format, output, onError, threads, limit, shard, resume, quiet, noColor])
+        foreach (Option option in (Option[])[format, inputFormat, output, onError, threads, limit, shard, resume, quiet, noColor])
         {
             command.Options.Add(option);
         }
@@ -61,6 +70,13 @@ internal sealed class RecordOptions
                 : ["-"];
         }
 
+        RecordFormat? forced = parsed.GetValue(inputFormat) is { } name ? FormatNames[name] : null;
+        InputItem[] items = Array.ConvertAll(given, text => ReadInput(text, forced, host, parsed));
+        if (items.Count(static item => item.IsStandardInput) > 1)
+        {
+            throw new ToolException(ExitCode.WrongUsage, "standard input (-) can be read once only.");
+        }
+
         int count = parsed.GetValue(threads);
         if (count is < 0 or > 1024)
         {
@@ -73,22 +89,70 @@ internal sealed class RecordOptions
             throw new ToolException(ExitCode.WrongUsage, "--limit takes a number of records, 0 or more.");
         }
 
+        string? file = parsed.GetValue(output);
+        if (parsed.GetValue(resume) && file is null)
+        {
+            throw new ToolException(ExitCode.WrongUsage, "--resume needs --output FILE.");
+        }
+
+        (int Part, int Parts)? part = ReadShard(parsed.GetValue(shard));
+        if (part is not null && items.Any(static item => item.IsStandardInput))
+        {
+            throw new ToolException(
+                ExitCode.WrongUsage, "--shard needs files: the records of standard input cannot be counted beforehand.");
+        }
+
         return new PipelineOptions
         {
-            Inputs = given,
-            Format = Enum.Parse<OutputFormat>(parsed.GetValue(format)!, ignoreCase: true),
-            OutputFile = parsed.GetValue(output),
+            Inputs = items,
+            Format = ReadFormat(parsed, file),
+            OutputFile = file,
             StopOnError = parsed.GetValue(onError) == "stop",
-            Threads = count == 0 ? Environment.ProcessorCount : count,
+            Threads = items.All(static item => item.IsArgument) ? 1 : count == 0 ? Environment.ProcessorCount : count,
             Limit = most ?? long.MaxValue,
-            Shard = ReadShard(parsed.GetValue(shard)),
+            Shard = part,
             Resume = parsed.GetValue(resume),
             Quiet = parsed.GetValue(quiet),
+            Job = JobOf(parsed),
         };
     }
 
-    internal static int Run(ToolHost host, PipelineOptions options, Func<InputRecord, Rendered> render, string header) =>
-        new RecordPipeline(host, options, render, Encoding.UTF8.GetBytes(header)).Run();
+    private static InputItem ReadInput(string text, RecordFormat? forced, ToolHost host, ParseResult parsed)
+    {
+        // No SMILES starts with a hyphen, so this is a mistyped option.
+        if (text.Length > 1 && text[0] == '-')
+        {
+            string? near = parsed.CommandResult.Command.Options.Select(static option => option.Name)
+                .FirstOrDefault(name => name.StartsWith(text[..Math.Min(text.Length, 5)], StringComparison.Ordinal));
+            throw new ToolException(
+                ExitCode.WrongUsage, $"there is no option '{text}'{(near is null ? "" : $"; did you mean {near}?")}");
+        }
+
+        return InputItem.Of(text, forced, host.Input);
+    }
+
+    // Without --format the ending of the output file decides, then the default of the command.
+    private OutputFormat ReadFormat(ParseResult parsed, string? file)
+    {
+        if (parsed.GetResult(format) is { Implicit: false } || file is null)
+        {
+            return Enum.Parse<OutputFormat>(parsed.GetValue(format)!, ignoreCase: true);
+        }
+
+        string ending = System.IO.Path.GetExtension(file).TrimStart('.');
+        return formats.FirstOrDefault(one => one.Equals(ending, StringComparison.OrdinalIgnoreCase)) is { } byName
+            ? Enum.Parse<OutputFormat>(byName, ignoreCase: true)
+            : Enum.Parse<OutputFormat>(parsed.GetValue(format)!, ignoreCase: true);
+    }
+
+    // Everything that can change the bytes; how fast and how loud the run goes cannot.
+    private string JobOf(ParseResult parsed)
+    {
+        Option[] without = [output, threads, resume, quiet, noColor];
+        return parsed.CommandResult.Command.Name + "\n" + string.Join('\n', parsed.CommandResult.Command.Options
+            .Where(option => !without.Contains(option))
+            .Select(option => option.Name + "=" + string.Join(' ', parsed.GetResult(option)?.Tokens.Select(static t => t.Value) ?? [])));
+    }
 
     private static (int Part, int Parts)? ReadShard(string? text)
     {

@@ -4,12 +4,12 @@ using RadicalSites.Reporting;
 
 namespace RadicalSites.Cli.Commands;
 
-/// <summary>The command <c>sites</c>: every C(sp3)-H site with its bond enthalpy, no reaction.</summary>
+/// <summary>The command <c>sites</c>: sites and bond enthalpies, no reaction.</summary>
 internal static class SitesCommand
 {
     internal static Command Build(ToolHost host)
     {
-        var command = new Command("sites", "C(sp3)-H sites: class, equivalence, bond dissociation enthalpy with evidence.");
+        var command = new Command("sites", "Every C(sp3)-H site: class, equivalence, bond dissociation enthalpy with evidence.");
         var records = new RecordOptions("table", "json", "ndjson", "csv");
         var chemistry = new ChemistryOptions();
         records.AddTo(command);
@@ -17,33 +17,34 @@ internal static class SitesCommand
         command.SetAction(parsed =>
         {
             PipelineOptions options = records.Read(parsed, host);
-            HalogenationOptions halogenation = chemistry.ReadOptions(parsed, withStereo: false);
-            return RecordOptions.Run(
-                host, options, record => Render(record, options, halogenation),
-                options.Format == OutputFormat.Csv ? CsvReport.SiteHeader + "\n" : "");
+            HalogenationOptions analysis = chemistry.ReadOptions(parsed, withStereo: false);
+            return new RecordRun(host, options, Plan(options, analysis), analysis.Table.Version).Run();
         });
         return command;
     }
 
-    private static Rendered Render(InputRecord record, PipelineOptions options, HalogenationOptions halogenation)
+    private static OutputPlan Plan(PipelineOptions options, HalogenationOptions analysis) => options.Format switch
     {
-        if (record.Molecule is null)
-        {
-            return Renderer.Failure(record, options);
-        }
-
-        SiteReport report = Halogenation.FindSites(record.Molecule, halogenation);
-        byte[] bytes = options.Format switch
-        {
-            OutputFormat.Json or OutputFormat.Ndjson => Renderer.Json(
-                Renderer.Indented(options), writer => JsonReport.Write(writer, record.Source, report)),
-            OutputFormat.Csv => Renderer.Text(writer => CsvReport.Write(writer, record.Source, report)),
-            _ => Renderer.Text(writer =>
+        OutputFormat.Csv => new OutputPlan(CsvReport.Header(CsvShape.Sites) + "\n", () => new CsvRecordWriter(
+            CsvShape.Sites,
+            (output, source, molecule) =>
             {
-                Renderer.Separate(writer, record);
-                TextReport.Write(writer, record.Source, report);
-            }),
-        };
-        return new Rendered(bytes, record, null);
-    }
+                CsvReport.Write(output, source, Halogenation.FindSites(molecule, analysis));
+                return true;
+            })),
+        OutputFormat.Table => new OutputPlan("", () => new TextRecordWriter(
+            options.IsSingle,
+            (writer, source, molecule) =>
+            {
+                TextReport.Write(writer, source, Halogenation.FindSites(molecule, analysis));
+                return true;
+            })),
+        _ => new OutputPlan("", () => new JsonRecordWriter(
+            options.IsIndented,
+            (writer, source, molecule) =>
+            {
+                JsonReport.Write(writer, source, Halogenation.FindSites(molecule, analysis));
+                return true;
+            })),
+    };
 }

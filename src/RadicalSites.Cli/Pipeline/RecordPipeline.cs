@@ -1,176 +1,242 @@
 using System;
+using System.Collections.Concurrent;
 using System.Collections.Generic;
-using System.Diagnostics;
-using System.Globalization;
-using System.Linq;
+using System.Threading;
 using System.Threading.Tasks;
-using RadicalSites.Diagnostics;
+using RadicalSites.Cli.Input;
+using RadicalSites.Cli.Output;
 
 namespace RadicalSites.Cli.Pipeline;
 
-/// <summary>Reads records in blocks, renders each block on several threads, writes it in order: constant memory, one order.</summary>
-internal sealed class RecordPipeline(ToolHost host, PipelineOptions options, Func<InputRecord, Rendered> render, byte[] header)
+/// <summary>
+/// Reads, computes on several threads and writes in input order. A fixed number of batches goes round, so memory does not
+/// grow with the input and a slow reader of the output slows the input down.
+/// </summary>
+internal sealed class RecordPipeline
 {
-    private const int BlockSize = 512;
+    private readonly InputSequence input;
+    private readonly OutputPlan plan;
+    private readonly OutputTarget target;
+    private readonly PipelineOptions options;
+    private readonly PipelineLog log;
+    private readonly CancellationToken cancellation;
 
-    private readonly Stopwatch clock = Stopwatch.StartNew();
-    private TimeSpan lastReport = TimeSpan.Zero;
-    private long done;
-    private long failed;
+    private long remaining;
 
-    /// <summary>Runs to the end of the input, a limit, an error that stops, or a signal.</summary>
-    /// <returns>The exit code.</returns>
-    internal int Run()
+    internal RecordPipeline(
+        InputSequence input, OutputPlan plan, OutputTarget target, PipelineOptions options, long most,
+        PipelineLog log, CancellationToken cancellation)
     {
-        using var output = OutputTarget.Open(host, options);
-        long skip = output.RecordsDone;
-        done = skip;
-        bool first = options.Shard is not { Part: > 1 };
-        if (skip == 0 && first && header.Length > 0)
-        {
-            output.Write(header);
-        }
-
-        bool limited = false;
-        bool stopped = false;
-        var block = new List<RawRecord>(BlockSize);
-        using IEnumerator<RawRecord> records = Selected().GetEnumerator();
-        long position = 0;
-        while (!stopped && !host.Cancellation.IsCancellationRequested)
-        {
-            block.Clear();
-            while (block.Count < BlockSize && records.MoveNext())
-            {
-                if (position >= options.Limit)
-                {
-                    limited = true;
-                    break;
-                }
-
-                if (position++ >= skip)
-                {
-                    block.Add(records.Current);
-                }
-            }
-
-            if (block.Count == 0 && (limited || position >= skip))
-            {
-                break;
-            }
-
-            stopped = WriteBlock(output, Render(block));
-            output.Commit(done);
-            Report(final: false);
-            if (limited)
-            {
-                break;
-            }
-        }
-
-        Report(final: true);
-        bool cancelled = host.Cancellation.IsCancellationRequested;
-        output.Finish(complete: !cancelled && !stopped);
-        if (cancelled)
-        {
-            host.Error.Write($"radicalsites: interrupted after {done.ToString(CultureInfo.InvariantCulture)} records.\n");
-        }
-
-        return cancelled || limited ? ExitCode.LimitOrCancelled : failed > 0 ? ExitCode.SomeFailed : ExitCode.Done;
+        this.input = input;
+        this.plan = plan;
+        this.target = target;
+        this.options = options;
+        this.log = log;
+        this.cancellation = cancellation;
+        remaining = most;
+        Records = target.RecordsBefore;
+        Failed = target.FailedBefore;
     }
 
-    private IEnumerable<RawRecord> Selected()
+    /// <summary>Records written, those of an earlier run included.</summary>
+    internal long Records { get; private set; }
+
+    internal long Failed { get; private set; }
+
+    internal bool HadInternalError { get; private set; }
+
+    internal bool ReachedLimit { get; private set; }
+
+    /// <summary>Whether it ended before the input because of an error, with <c>--on-error stop</c>.</summary>
+    internal bool StoppedOnError { get; private set; }
+
+    /// <summary>Whether it ended before the input because it was cancelled.</summary>
+    internal bool Cancelled { get; private set; }
+
+    internal void Run()
     {
-        if (options.Shard is not { } shard)
+        if (options.Threads == 1 && !input.ReadsStandardInput)
         {
-            return RecordInput.Read(options.Inputs, host);
-        }
-
-        if (options.Inputs.Contains("-"))
-        {
-            throw new ToolException(ExitCode.WrongUsage, "--shard needs files: standard input cannot be counted beforehand.");
-        }
-
-        // Contiguous blocks of record numbers, so that the outputs joined in order are the output of one run.
-        long count = RecordInput.Read(options.Inputs, host).LongCount();
-        long from = count * (shard.Part - 1) / shard.Parts;
-        long to = count * shard.Part / shard.Parts;
-        return RecordInput.Read(options.Inputs, host).Where(record => record.Number > from && record.Number <= to);
-    }
-
-    private Rendered[] Render(List<RawRecord> block)
-    {
-        var rendered = new Rendered[block.Count];
-        if (options.Threads == 1 || block.Count == 1)
-        {
-            for (int i = 0; i < rendered.Length; i++)
-            {
-                rendered[i] = render(RecordInput.Parse(block[i]));
-            }
+            RunAlone();
         }
         else
         {
-            Parallel.For(
-                0, rendered.Length, new ParallelOptions { MaxDegreeOfParallelism = options.Threads },
-                i => rendered[i] = render(RecordInput.Parse(block[i])));
+            RunParallel();
         }
-
-        return rendered;
     }
 
-    // Returns whether to stop.
-    private bool WriteBlock(OutputTarget output, Rendered[] rendered)
+    private void RunAlone()
     {
-        foreach (Rendered record in rendered)
+        using RecordWriter writer = plan.CreateWriter();
+        using var work = new BatchWork();
+        while (!cancellation.IsCancellationRequested && ReadNext(work))
         {
-            output.Write(record.Bytes);
-            done++;
-            if (record.Problem is { } problem)
+            work.Compute(writer, options.StopOnError, cancellation);
+            if (!Write(work))
             {
-                failed++;
-                Complain(record.Record, problem);
-                if (options.StopOnError)
-                {
-                    return true;
-                }
+                return;
             }
         }
 
-        return false;
+        Cancelled |= cancellation.IsCancellationRequested;
     }
 
-    private void Complain(InputRecord record, FormatProblem problem)
+    private void RunParallel()
     {
-        if (options.OutputFile is null && record.Line == 0)
+        int count = options.Threads * 4;
+        using var free = new BlockingCollection<BatchWork>();
+        using var toDo = new BlockingCollection<BatchWork>();
+        using var inOrder = new BlockingCollection<BatchWork>();
+        var works = new List<BatchWork>(count);
+        for (int i = 0; i < count; i++)
         {
-            // A SMILES given as an argument: the whole message with its caret.
-            host.Error.Write(problem.Render() + "\n");
-            return;
+            works.Add(new BatchWork());
+            free.Add(works[i]);
         }
 
-        string place = problem.Position >= 0 ? string.Create(CultureInfo.InvariantCulture, $", position {problem.Position}") : "";
-        host.Error.Write(string.Create(
-            CultureInfo.InvariantCulture,
-            $"record {record.Source.Number}, line {record.Line}{place}: {problem.Code}: {problem.Message}\n"));
+        using var end = CancellationTokenSource.CreateLinkedTokenSource(cancellation);
+        Task reading = Start(() => ReadAll(free, toDo, inOrder, end.Token));
+        var workers = new Task[options.Threads];
+        for (int i = 0; i < workers.Length; i++)
+        {
+            workers[i] = Start(() => ComputeAll(toDo, end.Token));
+        }
+
+        try
+        {
+            while (TakeNext(inOrder) is { } work)
+            {
+                work.Done.Wait(CancellationToken.None);
+                bool goesOn = Write(work);
+                free.Add(work, CancellationToken.None);
+                if (!goesOn)
+                {
+                    break;
+                }
+            }
+
+            Cancelled |= cancellation.IsCancellationRequested && !StoppedOnError;
+        }
+        finally
+        {
+            // A reader that waits for standard input is left behind; the process ends without it.
+            end.Cancel();
+            toDo.CompleteAdding();
+            Task.WaitAll(workers, CancellationToken.None);
+            Join(reading);
+            foreach (BatchWork work in works)
+            {
+                work.Dispose();
+            }
+        }
     }
 
-    private void Report(bool final)
+    private void ReadAll(
+        BlockingCollection<BatchWork> free, BlockingCollection<BatchWork> toDo, BlockingCollection<BatchWork> inOrder,
+        CancellationToken end)
     {
-        if (options.Quiet || !host.ErrorIsTerminal || RecordInput.IsSingleArgument(options.Inputs))
+        try
         {
-            return;
+            while (!end.IsCancellationRequested)
+            {
+                BatchWork work = free.Take(end);
+                if (!ReadNext(work))
+                {
+                    break;
+                }
+
+                // What the writer waits for is always on its way through the workers.
+                toDo.Add(work, end);
+                inOrder.Add(work, end);
+            }
+        }
+        catch (Exception problem)
+            when (end.IsCancellationRequested && problem is OperationCanceledException or InvalidOperationException)
+        {
+            // The writer has stopped and closed the queues.
+        }
+        finally
+        {
+            inOrder.CompleteAdding();
+            toDo.CompleteAdding();
+        }
+    }
+
+    // After a cancellation what is finished is still written; a reader that waits for its input is not waited for.
+    private BatchWork? TakeNext(BlockingCollection<BatchWork> inOrder)
+    {
+        try
+        {
+            return inOrder.TryTake(out BatchWork? work, Timeout.Infinite, cancellation) ? work : null;
+        }
+        catch (OperationCanceledException)
+        {
+            return inOrder.TryTake(out BatchWork? work) ? work : null;
+        }
+    }
+
+    private void ComputeAll(BlockingCollection<BatchWork> toDo, CancellationToken end)
+    {
+        using RecordWriter writer = plan.CreateWriter();
+        foreach (BatchWork work in toDo.GetConsumingEnumerable(CancellationToken.None))
+        {
+            try
+            {
+                work.Compute(writer, options.StopOnError, end);
+            }
+            finally
+            {
+                work.Done.Set();
+            }
+        }
+    }
+
+    private bool ReadNext(BatchWork work)
+    {
+        work.Reset();
+        if (remaining <= 0 || !input.Read(work.Batch, remaining))
+        {
+            return false;
         }
 
-        if (!final && clock.Elapsed - lastReport < TimeSpan.FromMilliseconds(500))
+        remaining -= work.Batch.Records.Count;
+        return true;
+    }
+
+    // Returns whether the next batch may follow.
+    private bool Write(BatchWork work)
+    {
+        log.Report(work.Failures);
+        Records += work.Completed;
+        Failed += work.Failures.Count;
+        HadInternalError |= work.HadInternalError;
+        ReachedLimit |= work.ReachedLimit;
+        target.Write(work.Output.Written, Records, Failed);
+        log.Progress(Records, Failed);
+        if (options.StopOnError && work.Failures.Count > 0)
         {
-            return;
+            StoppedOnError = true;
+            return false;
         }
 
-        lastReport = clock.Elapsed;
-        double rate = done / Math.Max(1e-9, clock.Elapsed.TotalSeconds);
-        host.Error.Write(string.Create(CultureInfo.InvariantCulture, $"\r{done} records, {failed} failed, {rate:F0} records/s   "));
-        if (final)
+        return work.Completed == work.Batch.Records.Count;
+    }
+
+    private static Task Start(Action action) =>
+        Task.Factory.StartNew(action, CancellationToken.None, TaskCreationOptions.LongRunning, TaskScheduler.Default);
+
+    private void Join(Task reading)
+    {
+        try
         {
-            host.Error.Write("\n");
+            if (reading.Wait(options.ReaderGrace, CancellationToken.None))
+            {
+                reading.GetAwaiter().GetResult();
+            }
+        }
+        catch (AggregateException problems)
+        {
+            System.Runtime.ExceptionServices.ExceptionDispatchInfo.Throw(problems.InnerException!);
         }
     }
 }

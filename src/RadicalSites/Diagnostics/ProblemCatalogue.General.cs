@@ -22,6 +22,13 @@ public static partial class ProblemCatalogue
             "The input or the enumeration is larger than the options allow.",
             "Raise the limit in the options, or split the work.");
 
-        internal static IReadOnlyList<ProblemDescriptor> Entries => [NoSites, LimitReached];
+        /// <summary>A record could not be handled because of a mistake in the program.</summary>
+        public static readonly ProblemDescriptor Internal = new(
+            "internal-error", Severity.Error, "Mistake in the program",
+            "The record could not be handled: {0}.",
+            "A mistake in the program, not in the input.",
+            "Report it with the input; the other records are not affected.");
+
+        internal static IReadOnlyList<ProblemDescriptor> Entries => [NoSites, LimitReached, Internal];
     }
 }

@@ -1,196 +1,140 @@
 using System;
+using System.Buffers;
 using System.Collections.Generic;
-using System.Globalization;
+using System.Text.Encodings.Web;
 using System.Text.Json;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
-using RadicalSites.Products;
-using RadicalSites.Selectivity;
-using RadicalSites.Sites;
-using RadicalSites.Thermochemistry;
 
 namespace RadicalSites.Reporting;
 
-/// <summary>Writes reports and predictions as records of the schema <c>radicalsites/1</c>.</summary>
+/// <summary>Writes results as JSON records of the schema <c>radicalsites/1</c>; see <see cref="ReportSchema"/>.</summary>
 /// <remarks>
-/// Numbers are written so that reading them back gives the same value. Atom indices are those of the input, hydrogens
-/// written as atoms counted. Stateless and safe for use by many threads.
+/// Every method writes one complete object. Atom indices are those of the input, hydrogens written as atoms counted.
+/// Numbers are written so that reading them back gives the same value; what is not known is null, never NaN. The caller
+/// owns the writer, so one writer and one buffer serve any number of records. Stateless and safe for use by many threads.
 /// </remarks>
 public static partial class JsonReport
 {
     /// <summary>Name of the schema.</summary>
-    public const string Schema = "radicalsites/1";
+    public const string Schema = ReportSchema.Id;
 
-    /// <summary>Writes the sites of a molecule without any reaction.</summary>
-    /// <param name="writer">Where to write; one object is written.</param>
-    /// <param name="source">Record number, text and name of the input.</param>
-    /// <param name="report">The report.</param>
-    public static void Write(Utf8JsonWriter writer, RecordSource source, SiteReport report)
+    /// <summary>Writer options for the records: compact, with plain text as far as JSON allows.</summary>
+    /// <param name="indented">Whether to write for people, with line feeds and two spaces.</param>
+    /// <returns>The options.</returns>
+    public static JsonWriterOptions WriterOptions(bool indented = false) => new()
     {
-        ArgumentNullException.ThrowIfNull(writer);
-        ArgumentNullException.ThrowIfNull(source);
-        ArgumentNullException.ThrowIfNull(report);
-        Begin(writer, source, "ok");
-        writer.WriteString("canonicalSmiles", report.CanonicalSmiles);
-        writer.WriteString("dataVersion", report.DataVersion);
-        WriteSites(writer, report.Molecule, report.Sites);
-        WriteDiagnostics(writer, report.Molecule, report.Diagnostics);
-        writer.WriteEndObject();
-    }
+        // The default encoder escapes + and ' for web pages, which makes SMILES unreadable.
+        Encoder = JavaScriptEncoder.UnsafeRelaxedJsonEscaping,
+        Indented = indented,
+        NewLine = "\n",
+        SkipValidation = !indented,
+    };
 
-    /// <summary>Writes a prediction.</summary>
-    /// <param name="writer">Where to write; one object is written.</param>
+    /// <summary>Writes the record of an input that could not be read.</summary>
+    /// <param name="writer">Writer of the caller.</param>
     /// <param name="source">Record number, text and name of the input.</param>
-    /// <param name="prediction">The prediction.</param>
-    public static void Write(Utf8JsonWriter writer, RecordSource source, Prediction prediction)
-    {
-        ArgumentNullException.ThrowIfNull(writer);
-        ArgumentNullException.ThrowIfNull(source);
-        ArgumentNullException.ThrowIfNull(prediction);
-        Begin(writer, source, "ok");
-        writer.WriteString("canonicalSmiles", prediction.CanonicalSmiles);
-        writer.WriteString("dataVersion", prediction.DataVersion);
-        WriteConditions(writer, prediction.Conditions);
-        WriteSites(writer, prediction.Molecule, prediction.Sites);
-        WriteProducts(writer, prediction.Products);
-        WriteDiagnostics(writer, prediction.Molecule, prediction.Diagnostics);
-        writer.WriteEndObject();
-    }
-
-    /// <summary>Writes a record that could not be read.</summary>
-    /// <param name="writer">Where to write; one object is written.</param>
-    /// <param name="source">Record number, text and name of the input.</param>
-    /// <param name="problem">What is wrong.</param>
+    /// <param name="problem">What is wrong with it.</param>
     public static void WriteError(Utf8JsonWriter writer, RecordSource source, FormatProblem problem)
     {
         ArgumentNullException.ThrowIfNull(writer);
         ArgumentNullException.ThrowIfNull(source);
         ArgumentNullException.ThrowIfNull(problem);
-        Begin(writer, source, "error");
-        writer.WriteStartObject("error");
-        writer.WriteString("code", problem.Code);
-        writer.WriteString("message", problem.Message);
+        Begin(writer, source, isOk: false);
+        writer.WriteStartObject("error"u8);
+        writer.WriteString("code"u8, problem.Code);
+        writer.WriteString("message"u8, problem.Message);
         if (problem.Line > 0)
         {
-            writer.WriteNumber("line", problem.Line);
-        }
-        else if (problem.Position >= 0)
-        {
-            writer.WriteNumber("position", problem.Position);
+            writer.WriteNumber("line"u8, problem.Line);
         }
 
+        if (problem.Position >= 0)
+        {
+            writer.WriteNumber("position"u8, problem.Position);
+        }
+
+        if (problem.SecondPosition >= 0)
+        {
+            writer.WriteNumber("secondPosition"u8, problem.SecondPosition);
+        }
+
+        writer.WriteString("cause"u8, problem.Descriptor.Cause);
+        writer.WriteString("remedy"u8, problem.Descriptor.Remedy);
         writer.WriteEndObject();
         writer.WriteEndObject();
     }
 
-    /// <summary>Writes the fields that every record starts with; the caller ends the object.</summary>
-    internal static void Begin(Utf8JsonWriter writer, RecordSource source, string status)
+    private static void Begin(Utf8JsonWriter writer, RecordSource source, bool isOk)
     {
         writer.WriteStartObject();
-        writer.WriteString("schema", Schema);
-        writer.WriteNumber("record", source.Number);
-        writer.WriteString("status", status);
-        writer.WriteString("input", source.Text);
-        writer.WriteString("name", source.Name);
+        writer.WriteString("schema"u8, ReportSchema.IdUtf8);
+        writer.WriteNumber("record"u8, source.Number);
+        writer.WriteString("status"u8, isOk ? "ok"u8 : "error"u8);
+        writer.WriteString("input"u8, source.Text);
+        writer.WriteString("name"u8, source.Name);
     }
 
-    internal static void WriteConditions(Utf8JsonWriter writer, ReactionConditions conditions)
+    private static void End(Utf8JsonWriter writer, Molecule molecule, IReadOnlyList<Diagnostic> diagnostics)
     {
-        writer.WriteStartObject("conditions");
-        writer.WriteString("reagent", conditions.Reagent.Id);
-        writer.WriteString("carrier", conditions.Reagent.Carrier.Name);
-        writer.WriteString("halogen", Elements.SymbolOf(conditions.Reagent.Halogen));
-        writer.WriteNumber("temperatureKelvin", conditions.Temperature.Kelvin);
-        writer.WriteString("solvent", conditions.Solvent);
+        writer.WriteStartArray("diagnostics"u8);
+        for (int i = 0; i < diagnostics.Count; i++)
+        {
+            Diagnostic diagnostic = diagnostics[i];
+            writer.WriteStartObject();
+            writer.WriteString("code"u8, diagnostic.Code);
+            writer.WriteString("severity"u8, SiteWords.Encoded(diagnostic.Severity));
+            writer.WriteString("message"u8, diagnostic.Message);
+            Atoms(writer, "atoms"u8, molecule, diagnostic.Atoms);
+            writer.WriteEndObject();
+        }
+
+        writer.WriteEndArray();
         writer.WriteEndObject();
     }
 
-    internal static void WriteDiagnostics(Utf8JsonWriter writer, Molecule molecule, IReadOnlyList<Diagnostic> diagnostics)
-    {
-        writer.WriteStartArray("diagnostics");
-        foreach (Diagnostic diagnostic in diagnostics)
-        {
-            writer.WriteStartObject();
-            writer.WriteString("code", diagnostic.Code);
-            writer.WriteString("severity", NameOf(diagnostic.Severity));
-            writer.WriteString("message", diagnostic.Message);
-            WriteAtoms(writer, "atoms", molecule, diagnostic.Atoms);
-            writer.WriteEndObject();
-        }
-
-        writer.WriteEndArray();
-    }
-
-    private static string NameOf(Severity severity) => severity switch
-    {
-        Severity.Info => "info",
-        Severity.Caution => "caution",
-        Severity.Danger => "danger",
-        _ => "error",
-    };
-
-    private static void WriteAtoms(Utf8JsonWriter writer, string name, Molecule molecule, IReadOnlyList<int> atoms)
+    private static void Atoms(
+        Utf8JsonWriter writer, ReadOnlySpan<byte> name, Molecule molecule, IReadOnlyList<int> atoms)
     {
         writer.WriteStartArray(name);
-        foreach (int atom in atoms)
+        for (int i = 0; i < atoms.Count; i++)
         {
-            writer.WriteNumberValue(molecule.InputIndexOf(atom));
+            writer.WriteNumberValue(atoms[i] < 0 ? atoms[i] : molecule.InputIndexOf(atoms[i]));
         }
 
         writer.WriteEndArray();
     }
 
-    private static void WriteProducts(Utf8JsonWriter writer, IReadOnlyList<HalogenationProduct> products)
+    private static void Numbers(Utf8JsonWriter writer, ReadOnlySpan<byte> name, IReadOnlyList<int> numbers)
     {
-        writer.WriteStartArray("products");
-        foreach (HalogenationProduct product in products)
+        writer.WriteStartArray(name);
+        for (int i = 0; i < numbers.Count; i++)
         {
-            writer.WriteStartObject();
-            writer.WriteNumber("product", product.Number);
-            writer.WriteString("smiles", product.CanonicalSmiles);
-            WriteNumber(writer, "share", product.Share);
-            WriteNumber(writer, "shareLow", product.ShareLow);
-            WriteNumber(writer, "shareHigh", product.ShareHigh);
-            writer.WriteNumber("degeneracy", product.Degeneracy);
-            writer.WriteStartArray("sites");
-            foreach (int site in product.Sites)
-            {
-                writer.WriteNumberValue(site);
-            }
-
-            writer.WriteEndArray();
-            writer.WriteString("route", product.Route == ProductRoute.Direct ? "direct" : "transposed");
-            writer.WriteString("stereo", product.Stereo switch
-            {
-                StereoOutcome.None => "none",
-                StereoOutcome.Racemic => "racemic",
-                StereoOutcome.Diastereomers => "diastereomers",
-                StereoOutcome.Retained => "retained",
-                StereoOutcome.Epimerised => "epimerised",
-                _ => "lost",
-            });
-            if (product.Stereoisomers is null)
-            {
-                writer.WriteNull("stereoisomers");
-            }
-            else
-            {
-                writer.WriteStartArray("stereoisomers");
-                foreach (string isomer in product.Stereoisomers)
-                {
-                    writer.WriteStringValue(isomer);
-                }
-
-                writer.WriteEndArray();
-            }
-
-            writer.WriteEndObject();
+            writer.WriteNumberValue(numbers[i]);
         }
 
         writer.WriteEndArray();
     }
 
-    private static void WriteNumber(Utf8JsonWriter writer, string name, double? value)
+    private static void Strings(Utf8JsonWriter writer, ReadOnlySpan<byte> name, IReadOnlyList<string>? texts)
+    {
+        if (texts is null)
+        {
+            writer.WriteNull(name);
+            return;
+        }
+
+        writer.WriteStartArray(name);
+        for (int i = 0; i < texts.Count; i++)
+        {
+            writer.WriteStringValue(texts[i]);
+        }
+
+        writer.WriteEndArray();
+    }
+
+    // An overflown rate has no decimal form; null says that there is no number.
+    private static void Number(Utf8JsonWriter writer, ReadOnlySpan<byte> name, double? value)
     {
         if (value is { } number && double.IsFinite(number))
         {

@@ -2,7 +2,7 @@ namespace RadicalSites.Reporting;
 
 /// <summary>Where a record comes from.</summary>
 /// <remarks>Immutable and safe for use by many threads.</remarks>
-/// <param name="Number">1-based number of the record in the input.</param>
-/// <param name="Text">The SMILES, or a short description of another format.</param>
+/// <param name="Number">1-based number of the record in the whole input.</param>
+/// <param name="Text">The SMILES as read; <see langword="null"/> for a record of a molfile or SDF.</param>
 /// <param name="Name">Name of the record, or <see langword="null"/>.</param>
-public sealed record RecordSource(long Number, string Text, string? Name);
+public sealed record RecordSource(long Number, string? Text, string? Name);

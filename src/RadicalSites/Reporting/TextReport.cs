@@ -28,12 +28,12 @@ public static class TextReport
         ArgumentNullException.ThrowIfNull(report);
         Head(writer, source, report.CanonicalSmiles, report.Molecule);
         writer.Write($"C-H sites, bond dissociation enthalpies at 298 K (data {report.DataVersion})\n\n");
-        var table = new TextTable("site", ">H", "class", ">ring", "hydrogens", ">C-H kJ/mol", "basis", "rows");
+        var table = new TextTable("site", ">H", "class", "hydrogens", ">C-H kJ/mol", "basis", "rows");
         foreach (SitePrediction entry in report.Sites)
         {
             table.Add(
                 Label(report.Molecule, entry.Site), Count(entry.Site.HydrogenCount), SiteWords.Describe(entry.Site),
-                entry.Site.RingSize is { } size ? Count(size) : "", entry.Site.Topicity.ToString().ToLowerInvariant(),
+                entry.Site.Topicity.ToString().ToLowerInvariant(),
                 Bde(entry.Bde), SiteWords.Of(entry.Bde.Basis), Rows(entry.Bde));
         }
 

@@ -1,0 +1,47 @@
+using System;
+using System.Collections.Generic;
+
+namespace RadicalSites.Cli.Input;
+
+/// <summary>Consecutive records of one source, read but not yet understood.</summary>
+internal sealed class RecordBatch
+{
+    internal const int MostRecords = 256;
+    internal const int MostBytes = 1 << 16;
+
+    private byte[] data = new byte[4096];
+    private int length;
+
+    internal List<RawRecord> Records { get; } = [];
+
+    internal RecordFormat Format { get; set; }
+
+    /// <summary>Name of the source for messages.</summary>
+    internal string Source { get; set; } = "";
+
+    internal bool IsFull => Records.Count >= MostRecords || length >= MostBytes;
+
+    internal ReadOnlySpan<byte> BytesOf(RawRecord record) => data.AsSpan(record.Start, record.Length);
+
+    internal void Add(long number, long line, ReadOnlySpan<byte> record)
+    {
+        if (length + record.Length > data.Length)
+        {
+            Array.Resize(ref data, Math.Max(2 * data.Length, length + record.Length));
+        }
+
+        record.CopyTo(data.AsSpan(length));
+        Records.Add(new RawRecord(number, line, length, record.Length));
+        length += record.Length;
+    }
+
+    internal void Clear()
+    {
+        Records.Clear();
+        length = 0;
+        if (data.Length > 4 * MostBytes)
+        {
+            data = new byte[4096];
+        }
+    }
+}
