@@ -38,6 +38,54 @@ public class ReferenceToolkitTests
     }
 
     [Fact]
+    public void Enumerate_stereo_of_real_molecules_equals_the_reference()
+    {
+        var options = new ProductOptions { IncludeTransposed = false };
+        foreach (string[] fields in Rows("replace_one_hydrogen_stereo.tsv"))
+        {
+            Molecule molecule = SmilesReader.Parse(fields[0]);
+            string expected = string.Join('\n', fields[1].Split(' ', StringSplitOptions.RemoveEmptyEntries)
+                .Select(static one => CanonicalSmiles.Write(SmilesReader.Parse(one))).Distinct().Order(StringComparer.Ordinal));
+
+            Assert.Equal(expected, string.Join('\n', ProductEnumerator.Enumerate(SiteFinder.Find(molecule), 17, options).Products
+                .Select(static product => product.CanonicalSmiles).Order(StringComparer.Ordinal)));
+            Assert.Equal(expected, string.Join('\n', IsomerEnumeration.Of(molecule, new IsomerOptions()).Enumerate()
+                .Select(static product => product.CanonicalSmiles).Order(StringComparer.Ordinal)));
+        }
+    }
+
+    [Theory]
+    [InlineData("CC1(C)[C@@H]2CC[C@@]1(C)C(=O)C2", "CC1(C)[C@@]2(Cl)CC[C@@]1(C)C(=O)C2")]
+    [InlineData("O=C1C[C@@H]2CC[C@H]1C2", "O=C1C[C@@]2(Cl)CC[C@H]1C2")]
+    public void Enumerate_bridgehead_of_a_small_cage_keeps_its_configuration(string substrate, string product)
+    {
+        // A bridgehead radical cannot turn inside out (common practice, no source).
+        string expected = CanonicalSmiles.Write(SmilesReader.Parse(product));
+
+        Assert.Contains(ProductEnumerator.Enumerate(SiteFinder.Find(SmilesReader.Parse(substrate)), 17).Products,
+            one => one.CanonicalSmiles == expected && one.Stereo == StereoOutcome.Retained);
+    }
+
+    [Fact]
+    public void Enumerate_real_molecules_renumbered_give_the_same_products_and_degeneracies()
+    {
+        var random = new Random(1905);
+        foreach (string[] fields in Rows("replace_one_hydrogen_stereo.tsv").Concat(Rows("replace_one_hydrogen.tsv").Take(150)))
+        {
+            Molecule molecule = SmilesReader.Parse(fields[0]);
+            int[] ranks = [.. Enumerable.Range(0, molecule.AtomCount)];
+            random.Shuffle(ranks);
+
+            Assert.Equal(Describe(molecule), Describe(SmilesReader.Parse(SmilesWriter.Write(molecule, ranks))));
+        }
+    }
+
+    private static string Describe(Molecule molecule) => string.Join(
+        '\n', ProductEnumerator.Enumerate(SiteFinder.Find(molecule), 35).Products
+            .Select(static one => $"{one.CanonicalSmiles} {one.Degeneracy} {one.Route} {one.Stereo}")
+            .Order(StringComparer.Ordinal));
+
+    [Fact]
     public void Count_equals_the_reference_brute_force_for_one_two_and_three_halogens()
     {
         foreach (string[] fields in Rows("replace_many_hydrogens.tsv"))
