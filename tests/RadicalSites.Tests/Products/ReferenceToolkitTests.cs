@@ -55,8 +55,8 @@ public class ReferenceToolkitTests
     }
 
     [Theory]
-    [InlineData("CC1(C)[C@@H]2CC[C@@]1(C)C(=O)C2", "CC1(C)[C@@]2(Cl)CC[C@@]1(C)C(=O)C2")]
-    [InlineData("O=C1C[C@@H]2CC[C@H]1C2", "O=C1C[C@@]2(Cl)CC[C@H]1C2")]
+    [InlineData("CC1(C)[C@@H]2CC[C@@]1(C)C(=O)C2", "CC1(C)[C@]2(Cl)CC[C@@]1(C)C(=O)C2")]
+    [InlineData("O=C1C[C@@H]2CC[C@H]1C2", "O=C1C[C@]2(Cl)CC[C@H]1C2")]
     public void Enumerate_bridgehead_of_a_small_cage_keeps_its_configuration(string substrate, string product)
     {
         // A bridgehead radical cannot turn inside out (common practice, no source).

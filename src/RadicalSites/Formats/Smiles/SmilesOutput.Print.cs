@@ -197,6 +197,11 @@ internal sealed partial class SmilesOutput
         bool bothAromatic = molecule.AtomSpan[from].IsAromatic && molecule.AtomSpan[to].IsAromatic;
         if (bond.IsAromatic && bothAromatic)
         {
+            if (DirectionOf(from, index, to) is var mark and not '\0')
+            {
+                Append(mark);
+            }
+
             return;
         }
 

@@ -155,12 +155,20 @@ internal sealed partial class SmilesOutput
 
     private bool PrintedBefore(int other, int atom) => visited[other] < visited[atom];
 
+    // Aromatic bonds carry the mark only where an end has no other single bond: the ring side of c=N or c=C.
     private int PrintedFirst(int atom)
+    {
+        int best = PrintedFirst(atom, aromatic: false);
+        return best >= 0 ? best : PrintedFirst(atom, aromatic: true);
+    }
+
+    private int PrintedFirst(int atom, bool aromatic)
     {
         int best = -1;
         foreach (Neighbor neighbor in molecule.NeighborsOf(atom))
         {
-            if (molecule.BondSpan[neighbor.Bond].Order == BondOrder.Single && !IsUnusable(neighbor.Bond)
+            Bond bond = molecule.BondSpan[neighbor.Bond];
+            if (bond.IsAromatic == aromatic && (aromatic || bond.Order == BondOrder.Single)
                 && (best < 0 || visited[neighbor.Atom] < visited[best]))
             {
                 best = neighbor.Atom;
@@ -169,8 +177,6 @@ internal sealed partial class SmilesOutput
 
         return best;
     }
-
-    private bool IsUnusable(int bond) => molecule.BondSpan[bond].IsAromatic;
 
     private int SideOf(int atom, int carrier)
     {
