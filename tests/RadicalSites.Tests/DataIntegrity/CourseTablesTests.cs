@@ -1,8 +1,10 @@
 using System.Collections.Generic;
 using System.Linq;
 using System.Text.Json;
+using RadicalSites.Canonical;
 using RadicalSites.Course;
 using RadicalSites.Diagnostics;
+using RadicalSites.Formats.Smiles;
 using RadicalSites.Molecules;
 
 namespace RadicalSites.Tests.DataIntegrity;
@@ -70,7 +72,7 @@ public class CourseTablesTests
         "Cl", Plain(substrate), kelvin, new Dictionary<string, double> { [Plain(reference)] = 1 })!.Rate;
 
     private static string Plain(string smiles) =>
-        Canonical.CanonicalSmiles.Write(Formats.Smiles.SmilesReader.Parse(smiles));
+        CanonicalSmiles.Write(SmilesReader.Parse(smiles));
 
     private static IEnumerable<string> Keys() =>
         typeof(Molecule).Assembly.GetManifestResourceNames()
