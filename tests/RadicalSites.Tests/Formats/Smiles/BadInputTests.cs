@@ -28,7 +28,7 @@ public sealed class BadInputTests
     [InlineData("C!", "smiles-unexpected-character", 1)]
     [InlineData("CC name", "smiles-white-space", 2)]
     [InlineData("F/C(\\Cl)=C/F", "smiles-direction-conflict", 4)]
-    [InlineData("C[C@](F)Cl", "", -1)]
+    [InlineData("C[C@](F)Cl", "smiles-stereo-neighbors", 1)]
     [InlineData("C[C@H]Cl", "smiles-stereo-neighbors", 1)]
     [InlineData("C(C)(C)(C)(C)C", "chemistry-valence", 0)]
     [InlineData("[CH5]", "chemistry-valence", 0)]
