@@ -41,6 +41,7 @@ internal sealed partial class ColorPartition
         Reserve(n);
         Count = n;
         Trace = 17;
+        SplitsTies = false;
         ulong[] keys = graph.Key;
         int[] members = Members;
         if (n <= 40)
@@ -125,6 +126,7 @@ internal sealed partial class ColorPartition
         Count = n;
         CellCount = other.CellCount;
         Trace = other.Trace;
+        SplitsTies = other.SplitsTies;
         Array.Copy(other.Members, Members, n);
         Array.Copy(other.Position, Position, n);
         Array.Copy(other.CellOf, CellOf, n);

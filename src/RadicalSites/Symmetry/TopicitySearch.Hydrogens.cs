@@ -58,7 +58,9 @@ internal sealed partial class TopicitySearch
         }
 
         RefineMirrored();
-        return workspace.Isomorphism.TryFind(
+        int[] image = workspace.Mirrored.CellOf;
+        return image[atom] == cellOf[atom] && image[first] == cellOf[first] && image[second] == cellOf[second]
+            && workspace.Isomorphism.TryFind(
             graph, stereo, workspace.Mirrored, [atom, first, second], [atom, first, second], workspace.MirroredConfiguration)
             ? Topicity.Enantiotopic
             : Topicity.Diastereotopic;

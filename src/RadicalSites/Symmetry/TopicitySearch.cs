@@ -38,6 +38,7 @@ internal sealed partial class TopicitySearch
         {
             stereo = owner.Stereo;
             stereo.CopyFrom(owner.Constitution);
+            stereo.SplitsTies = true;
             stereo.SeparateFoci(graph, stated);
             stereo.Refine(graph, graph.Configuration);
         }
@@ -55,12 +56,20 @@ internal sealed partial class TopicitySearch
             return;
         }
 
-        for (int cell = 0; cell < n; cell += cells.Length[cell])
+        for (int cell = 0; cell < n; cell += stereo.Length[cell])
         {
-            int end = cell + cells.Length[cell];
+            int end = cell + stereo.Length[cell];
             for (int i = cell + 1; i < end; i++)
             {
-                Place(cells, cell, i);
+                JoinProper(cell, i);
+            }
+        }
+
+        for (int atom = 0; atom < n; atom++)
+        {
+            if (workspace.ProperOrbits.Find(atom) == atom && cells.Length[cells.CellOf[atom]] > 1)
+            {
+                JoinMirror(atom);
             }
         }
     }
@@ -77,64 +86,75 @@ internal sealed partial class TopicitySearch
         }
     }
 
-    private void Place(ColorPartition cells, int cell, int index)
+    /// <summary>Joins the member of a cell with the first earlier member that an operation carries to it.</summary>
+    private void JoinProper(int cell, int index)
+    {
+        OrbitForest proper = workspace.ProperOrbits;
+        int atom = stereo.Members[index];
+        int tried = -1;
+        for (int i = cell; i < index; i++)
+        {
+            int other = stereo.Members[i];
+            int root = proper.Find(other);
+            if (root == proper.Find(atom) || (root != tried && TryProper(other, atom)))
+            {
+                return;
+            }
+
+            tried = root;
+        }
+    }
+
+    /// <summary>Joins a class with its mirror image, when there is one.</summary>
+    private void JoinMirror(int atom)
     {
         OrbitForest mirror = workspace.MirrorOrbits;
-        OrbitForest proper = workspace.ProperOrbits;
-        int atom = cells.Members[index];
-        for (int i = cell; i < index; i++)
-        {
-            int other = cells.Members[i];
-            if (constitutional[other] != constitutional[atom])
-            {
-                continue;
-            }
-
-            if (proper.Find(other) == proper.Find(atom) || TryProper(other, atom))
-            {
-                return;
-            }
-        }
-
         FlexibleFrames frames = workspace.Flexible;
-        MirrorState state = frames.Fragments[graph.FragmentIndexOf(atom)];
-        bool reflects = state == MirrorState.Always && frames.Depth[atom] <= 1
-            && !frames.HasOpenAxis[graph.FragmentIndexOf(atom)];
-        for (int i = cell; i < index; i++)
+        int fragment = graph.FragmentIndexOf(atom);
+        MirrorState state = frames.Fragments[fragment];
+        if (state == MirrorState.Always && frames.Depth[atom] <= 1 && !frames.HasOpenAxis[fragment])
         {
-            int other = cells.Members[i];
-            if (constitutional[other] != constitutional[atom])
-            {
-                continue;
-            }
-
             // Without a rigid frame any automorphism can be made to mirror by turning frames over on the spot; only atoms
             // that two nested frames would move need a closer look.
-            if (reflects)
-            {
-                mirror.Union(other, atom);
-                return;
-            }
+            mirror.Union(constitutional[atom], atom);
+            return;
+        }
 
-            if (state == MirrorState.Never && graph.FragmentIndexOf(other) == graph.FragmentIndexOf(atom))
+        if (state == MirrorState.Never && graph.FragmentCount == 1)
+        {
+            return;
+        }
+
+        RefineMirrored();
+        ColorPartition image = workspace.Mirrored;
+        int cell = stereo.CellOf[atom];
+        if (image.CellOf[image.Members[cell]] != cell)
+        {
+            return;
+        }
+
+        int tried = -1;
+        int end = cell + image.Length[cell];
+        for (int i = cell; i < end; i++)
+        {
+            int other = image.Members[i];
+            int root = workspace.ProperOrbits.Find(other);
+            if (root == atom)
             {
                 continue;
             }
 
-            if (mirror.Find(other) == mirror.Find(atom) || TryMirror(other, atom))
+            if (mirror.Find(other) == mirror.Find(atom) || (root != tried && TryMirror(atom, other)))
             {
                 return;
             }
+
+            tried = root;
         }
     }
 
     private bool TryProper(int from, int to)
     {
-        if (stereo.CellOf[from] != stereo.CellOf[to] || IsHeldPair(from, to))
-        {
-            return false;
-        }
-
         if (workspace.Probe.TryMap(graph, stereo, from, to))
         {
             for (int i = 0; i < workspace.Probe.AssignedCount; i++)
@@ -157,50 +177,9 @@ internal sealed partial class TopicitySearch
         return true;
     }
 
-    /// <summary>
-    /// Whether the two atoms are the only like ligands of a centre that stays in place, so that exchanging them inverts it.
-    /// </summary>
-    private bool IsHeldPair(int from, int to)
-    {
-        for (int i = graph.Offset[from]; i < graph.Offset[from + 1]; i++)
-        {
-            int focus = graph.Adjacent[i];
-            int e = graph.CenterAt[focus] - 1;
-            if (e < 0 || graph.Kind[e] != SymmetryGraph.Center || stereo.Length[stereo.CellOf[focus]] > 1
-                || graph.WeightBetween(focus, to) == 0)
-            {
-                continue;
-            }
-
-            int like = 0;
-            int others = -2;
-            bool distinct = true;
-            for (int c = 4 * e; c < (4 * e) + 4; c++)
-            {
-                int carrier = graph.Carriers[c];
-                int color = carrier < 0 ? -1 : stereo.CellOf[carrier];
-                if (color == stereo.CellOf[from])
-                {
-                    like++;
-                }
-                else
-                {
-                    distinct &= color != others;
-                    others = color;
-                }
-            }
-
-            return like == 2 && distinct;
-        }
-
-        return false;
-    }
-
     private bool TryMirror(int from, int to)
     {
-        RefineMirrored();
-        if (stereo.CellOf[from] != workspace.Mirrored.CellOf[to]
-            || !workspace.Isomorphism.TryFind(
+        if (!workspace.Isomorphism.TryFind(
                 graph, stereo, workspace.Mirrored, [from], [to], workspace.MirroredConfiguration))
         {
             return false;
@@ -220,6 +199,7 @@ internal sealed partial class TopicitySearch
         isMirrorRefined = true;
         graph.Mirror(ref workspace.MirroredConfiguration);
         workspace.Mirrored.CopyFrom(workspace.Constitution);
+        workspace.Mirrored.SplitsTies = true;
         workspace.Mirrored.SeparateFoci(graph, stated);
         workspace.Mirrored.Refine(graph, workspace.MirroredConfiguration);
     }
