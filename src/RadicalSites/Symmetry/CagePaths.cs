@@ -19,6 +19,18 @@ internal static class CagePaths
     private const int LargestFused = 4;
     private const int MostPaths = 400;
 
+    [ThreadStatic]
+    private static List<int>? lastNear;
+
+    [ThreadStatic]
+    private static SymmetryGraph? lastGraph;
+
+    [ThreadStatic]
+    private static int lastAtom;
+
+    [ThreadStatic]
+    private static int lastLoad;
+
     private readonly record struct Bridge(UInt128 Atoms, int First, int Last, int Length);
 
     /// <summary>Whether an atom of three ring bonds is joined to another atom by three short bridges.</summary>
@@ -43,14 +55,15 @@ internal static class CagePaths
     /// </summary>
     internal static int Relation(SymmetryGraph graph, int first, int second)
     {
-        if (graph.RingBondsOf(first) < 3 || graph.RingBondsOf(second) < 3)
+        // Spiro atoms and the like have four ring bonds and no outward ligand.
+        if (graph.RingBondsOf(first) != 3 || graph.RingBondsOf(second) != 3)
         {
             return 0;
         }
 
         int one = graph.CenterAt[first] - 1;
         int two = graph.CenterAt[second] - 1;
-        List<int> near = Ball(graph, first, LongestBridge);
+        List<int> near = NearOf(graph, first);
         if (!near.Contains(second) || !TryFind(graph, near, first, second, out int[] from, out int[] to))
         {
             return 0;
@@ -87,6 +100,20 @@ internal static class CagePaths
         }
 
         return sign;
+    }
+
+    /// <summary>Atoms in reach of an atom; kept for the next call, as callers go over the partners of one atom.</summary>
+    private static List<int> NearOf(SymmetryGraph graph, int atom)
+    {
+        if (lastNear is null || !ReferenceEquals(lastGraph, graph) || lastAtom != atom || lastLoad != graph.Generation)
+        {
+            lastNear = Ball(graph, atom, LongestBridge);
+            lastGraph = graph;
+            lastAtom = atom;
+            lastLoad = graph.Generation;
+        }
+
+        return lastNear;
     }
 
     private static List<int> Ball(SymmetryGraph graph, int atom, int radius)

@@ -33,7 +33,7 @@ internal sealed partial class FlexibleFrames
 
         if (!IsRingBond(stem, one))
         {
-            return MarkBranches(one, stem, graph.Kind[element] == SymmetryGraph.Axis ? 2 : 1);
+            return MarkBranches(element, one, stem);
         }
 
         return graph.Kind[element] == SymmetryGraph.Center && MarkRing(one, two, stem);
@@ -71,13 +71,23 @@ internal sealed partial class FlexibleFrames
         return false;
     }
 
-    /// <summary>Counts all like branches of a stem as movable when the first holds no rigid frame.</summary>
-    private bool MarkBranches(int root, int stem, int weight)
+    /// <summary>
+    /// Counts all like branches of a stem as movable when the first holds no rigid frame. Three of them take up any
+    /// exchange without the one in question, so that the frame asks for nothing.
+    /// </summary>
+    private bool MarkBranches(int element, int root, int stem)
     {
         int start = branch.Count;
         Walk(root, stem);
         bool free = HoldsNoRigidFrame(start);
         Truncate(start);
+        int weight = graph.Kind[element] == SymmetryGraph.Axis ? 2 : 1;
+        if (free && CountLike(root, stem) > 2)
+        {
+            State[element] = Idle;
+            return true;
+        }
+
         for (int i = graph.Offset[stem]; i < graph.Offset[stem + 1] && free; i++)
         {
             int other = graph.Adjacent[i];
@@ -96,6 +106,17 @@ internal sealed partial class FlexibleFrames
         }
 
         return free;
+    }
+
+    private int CountLike(int root, int stem)
+    {
+        int count = 0;
+        for (int i = graph.Offset[stem]; i < graph.Offset[stem + 1]; i++)
+        {
+            count += orbits[graph.Adjacent[i]] == orbits[root] && !graph.InRing[i] ? 1 : 0;
+        }
+
+        return count;
     }
 
     /// <summary>

@@ -19,6 +19,9 @@ internal sealed partial class FlexibleFrames
     private int[] seen = [];
     private int mark;
 
+    /// <summary>State of a frame that restricts nothing and is taken out of the graph.</summary>
+    private const sbyte Idle = 2;
+
     /// <summary>1 = flexible, -1 = rigid, by element.</summary>
     internal sbyte[] State = [];
 
@@ -70,6 +73,29 @@ internal sealed partial class FlexibleFrames
                 Restrict(e);
             }
         }
+
+        RemoveIdle();
+    }
+
+    private void RemoveIdle()
+    {
+        int kept = 0;
+        for (int e = 0; e < graph.ElementCount; e++)
+        {
+            if (State[e] != Idle)
+            {
+                State[kept++] = State[e];
+            }
+            else
+            {
+                graph.CenterAt[graph.Focus[e]] = 0;
+            }
+        }
+
+        if (kept < graph.ElementCount)
+        {
+            graph.Compact();
+        }
     }
 
     /// <summary>
@@ -97,7 +123,8 @@ internal sealed partial class FlexibleFrames
         {
             // Frames of one ring that depend on each other stay rigid: the one looked at first stands in the way.
             State[element] = -1;
-            State[element] = HasLikeBranches(element) ? (sbyte)1 : (sbyte)-1;
+            bool flexible = HasLikeBranches(element);
+            State[element] = !flexible ? (sbyte)-1 : State[element] == Idle ? Idle : (sbyte)1;
         }
 
         return State[element] > 0;

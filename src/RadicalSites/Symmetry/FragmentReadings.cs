@@ -11,7 +11,7 @@ namespace RadicalSites.Symmetry;
 internal sealed class FragmentReadings
 {
     private const int LargestGroup = 192;
-    private const int MostSteps = 20_000;
+    private const int MostSteps = 1000;
 
     private readonly SymmetryGraph graph;
     private readonly SymmetryWorkspace workspace;

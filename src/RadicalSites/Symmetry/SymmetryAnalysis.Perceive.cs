@@ -10,6 +10,8 @@ public sealed partial class SymmetryAnalysis
     /// <summary>Refinement steps allowed to all exact searches of one molecule.</summary>
     internal const int SearchLimit = 200_000;
 
+    private const int WorkLimit = 20_000_000;
+
     /// <summary>Finds the equivalent atoms and hydrogens of a molecule.</summary>
     /// <param name="molecule">Any molecule; may be empty or have several fragments.</param>
     /// <returns>The analysis.</returns>
@@ -19,7 +21,7 @@ public sealed partial class SymmetryAnalysis
         int n = molecule.AtomCount;
         SymmetryWorkspace workspace = SymmetryWorkspace.Own;
         SymmetryGraph graph = workspace.Graph;
-        workspace.Isomorphism.Begin(SearchLimit);
+        workspace.Isomorphism.Begin(LimitFor(n));
         StereoPerception.Prepare(workspace, molecule, false);
         int stated = graph.ElementCount;
         int[] constitutional = ConstitutionalOrbits(workspace, n);
@@ -43,6 +45,9 @@ public sealed partial class SymmetryAnalysis
                 ? [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], SearchLimit, "refinement steps")]
                 : []);
     }
+
+    /// <summary>Steps copy whole partitions, so that large molecules get fewer of them.</summary>
+    private static int LimitFor(int atoms) => Math.Min(SearchLimit, 1000 + (WorkLimit / Math.Max(1, atoms)));
 
     /// <summary>Orbits of the constitution, named by their lowest members, of a workspace that is refined.</summary>
     internal static int[] ConstitutionalOrbits(SymmetryWorkspace workspace, int n)

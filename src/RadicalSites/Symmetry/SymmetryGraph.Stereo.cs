@@ -67,6 +67,22 @@ internal sealed partial class SymmetryGraph
         Array.Clear(AxisAt, 0, AtomCount);
     }
 
+    /// <summary>Takes out the centres that <see cref="CenterAt"/> no longer names; the order of the others stays.</summary>
+    internal void Compact()
+    {
+        int count = ElementCount;
+        ElementCount = 0;
+        for (int e = 0; e < count; e++)
+        {
+            if (Kind[e] == Axis || CenterAt[Focus[e]] == e + 1)
+            {
+                Add(
+                    Kind[e], Focus[e], FocusEnd[e], Carriers[4 * e], Carriers[(4 * e) + 1], Carriers[(4 * e) + 2],
+                    Carriers[(4 * e) + 3], Configuration[e]);
+            }
+        }
+    }
+
     /// <summary>Takes over one stated element; geometries other than tetrahedral, allene and cis-trans are left out.</summary>
     internal void AddStated(StereoElement element)
     {

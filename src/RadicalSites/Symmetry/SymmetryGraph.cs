@@ -16,6 +16,9 @@ internal sealed partial class SymmetryGraph
     private const int QuadrupleWeight = 1 << 27;
 
     internal int AtomCount;
+
+    /// <summary>Number of molecules loaded so far; tells scratch of an earlier one apart.</summary>
+    internal int Generation;
     internal int[] Offset = new int[65];
     internal int[] Adjacent = new int[160];
     internal int[] Weight = new int[160];
@@ -31,6 +34,7 @@ internal sealed partial class SymmetryGraph
         ReadOnlySpan<Neighbor> neighbors = molecule.NeighborSpan;
         Reserve(n, neighbors.Length);
         AtomCount = n;
+        Generation++;
         molecule.NeighborOffsets.CopyTo(Offset);
         ReadOnlySpan<Bond> bonds = molecule.BondSpan;
         int[] adjacent = Adjacent;
