@@ -56,7 +56,7 @@ public static partial class CourseCalculator
         Within(options.MaximumEquivalents, 1e-6, 1000, nameof(CourseOptions.MaximumEquivalents));
         Within(options.PointCount, 2, 10_001, nameof(CourseOptions.PointCount));
         Within(options.MaximumHalogens ?? 1, 1, 64, nameof(CourseOptions.MaximumHalogens));
-        Within(options.SpeciesLimit, 2, 2000, nameof(CourseOptions.SpeciesLimit));
+        Within(options.SpeciesLimit, 2, 1000, nameof(CourseOptions.SpeciesLimit));
         Within(options.FollowThreshold, 0, 0.1, nameof(CourseOptions.FollowThreshold));
         Within(options.ByProductThreshold, 0, 1, nameof(CourseOptions.ByProductThreshold));
     }

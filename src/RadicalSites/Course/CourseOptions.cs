@@ -17,7 +17,7 @@ public sealed record CourseOptions
 
     internal int HalogensFollowed => MaximumHalogens ?? (int)System.Math.Min(64, System.Math.Ceiling(MaximumEquivalents) + 2);
 
-    /// <summary>Most species that are followed, 2 to 2000; 300 by default. Time grows with the cube.</summary>
+    /// <summary>Most species that are followed, 2 to 1000; 300 by default. Time grows with the cube, memory with the square.</summary>
     public int SpeciesLimit { get; init; } = 300;
 
     /// <summary>

@@ -29,7 +29,9 @@ internal static class CourseSolver
         for (int i = 0; i < options.PointCount; i++)
         {
             double target = options.MaximumEquivalents * i / (options.PointCount - 1);
-            double? found = propagator.Find(start, Consumed, target, MaximumUnits);
+            // The very end of the curve is only approached; a billionth before it stands for it.
+            double? found = propagator.Find(start, Consumed, target, MaximumUnits)
+                ?? propagator.Find(start, Consumed, target * (1 - 1e-9), MaximumUnits);
             if (found is null)
             {
                 break;

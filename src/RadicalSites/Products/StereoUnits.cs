@@ -47,6 +47,11 @@ internal static class StereoUnits
             return true;
         }
 
+        if (HasFaces(symmetry, atom) is { } decided)
+        {
+            return decided;
+        }
+
         units ??= StereoPerception.FindUnits(molecule);
         foreach (StereoUnit unit in units)
         {
@@ -58,6 +63,67 @@ internal static class StereoUnits
 
         return false;
     }
+
+    // A ring carbon with two like ring neighbours is a centre when the faces of its ring differ, which an atom with two
+    // unlike ligands outside the ring sees to (4-methylcyclohexanol). Null where a further ring makes it less simple.
+    private static bool? HasFaces(SymmetryAnalysis symmetry, int atom)
+    {
+        Molecule molecule = symmetry.Molecule;
+        int first = -1;
+        int second = -1;
+        foreach (Neighbor neighbor in molecule.NeighborsOf(atom))
+        {
+            if (molecule.BondSpan[neighbor.Bond].IsInRing)
+            {
+                (first, second) = (second, neighbor.Atom);
+            }
+        }
+
+        if (first < 0 || !AreLike(symmetry, first, second))
+        {
+            return null;
+        }
+
+        bool faces = false;
+        int before = atom;
+        int at = first;
+        while (at != atom)
+        {
+            int next = -1;
+            int outside = -1;
+            bool unlike = molecule.AtomSpan[at].HydrogenCount == 1;
+            foreach (Neighbor neighbor in molecule.NeighborsOf(at))
+            {
+                Bond bond = molecule.BondSpan[neighbor.Bond];
+                if (bond.IsInRing)
+                {
+                    if (neighbor.Atom != before && next >= 0)
+                    {
+                        return null;
+                    }
+
+                    next = neighbor.Atom == before ? next : neighbor.Atom;
+                }
+                else if (bond.Order != BondOrder.Single)
+                {
+                    return null;
+                }
+                else
+                {
+                    unlike |= outside >= 0 && !AreLike(symmetry, outside, neighbor.Atom);
+                    outside = neighbor.Atom;
+                }
+            }
+
+            faces |= outside >= 0 && unlike;
+            (before, at) = (at, next);
+        }
+
+        return faces;
+    }
+
+    private static bool AreLike(SymmetryAnalysis symmetry, int first, int second) =>
+        symmetry.OrbitOf(first, EquivalenceLevel.Constitutional) == symmetry.OrbitOf(second, EquivalenceLevel.Constitutional);
 
     /// <summary>Whether a centre or axis is stated.</summary>
     internal static bool HasStatedCentre(Molecule molecule)

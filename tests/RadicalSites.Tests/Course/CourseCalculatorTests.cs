@@ -116,6 +116,29 @@ public class CourseCalculatorTests
         Assert.Equal(fine.BestMono!.MonoYield, coarse.BestMono!.MonoYield, 10);
     }
 
+    [Theory]
+    [InlineData("C", 4)]
+    [InlineData("CC", 6)]
+    [InlineData("Cc1ccccc1", 3)]
+    public void Follow_curve_reaches_the_end_where_no_hydrogen_is_left(string smiles, int hydrogens)
+    {
+        HalogenationCourse course = Follow(
+            smiles, 298.15, new CourseOptions { MaximumEquivalents = hydrogens, FollowThreshold = 0 });
+
+        Assert.Equal(61, course.Points.Count);
+        Assert.Equal(1, course.Points[^1].Amounts[^1], 8);
+        Assert.DoesNotContain(course.Diagnostics, static diagnostic => diagnostic.Code == "course-ends-early");
+    }
+
+    [Fact]
+    public void Follow_curve_ends_early_where_more_halogen_is_asked_for_than_there_is_hydrogen()
+    {
+        HalogenationCourse course = Follow("C", 298.15, new CourseOptions { MaximumEquivalents = 8, PointCount = 9 });
+
+        Assert.Equal(5, course.Points.Count);
+        Assert.Contains(course.Diagnostics, static diagnostic => diagnostic.Code == "course-ends-early");
+    }
+
     [Fact]
     public void Follow_no_hydrogen_has_no_course()
     {

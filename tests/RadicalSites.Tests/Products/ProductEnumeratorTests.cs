@@ -44,6 +44,27 @@ public class ProductEnumeratorTests
         Assert.Equal(wanted, actual);
     }
 
+    // CH carbons: whether both configurations of the product differ (Epimerised) or not, worked out by hand.
+    [Theory]
+    [InlineData("CC1CCC(C)CC1", "CC1(Cl)CCC(C)CC1", StereoOutcome.Epimerised)]
+    [InlineData("CC1CCCCC1", "CC1(Cl)CCCCC1", StereoOutcome.None)]
+    [InlineData("CC1CCC(C)(C)CC1", "CC1(Cl)CCC(C)(C)CC1", StereoOutcome.None)]
+    [InlineData("CC1CCC(C)(CC)CC1", "CC1(Cl)CCC(C)(CC)CC1", StereoOutcome.Epimerised)]
+    [InlineData("CC1CCC(=O)CC1", "CC1(Cl)CCC(=O)CC1", StereoOutcome.None)]
+    [InlineData("CC1CC2CC2C1", "CC1(Cl)CC2CC2C1", StereoOutcome.Epimerised)]
+    [InlineData("CC1C2CCC1CC2", "CC1(Cl)C2CCC1CC2", StereoOutcome.None)]
+    [InlineData("CC1CCC2(CC1)CCCCC2", "CC1(Cl)CCC2(CC1)CCCCC2", StereoOutcome.None)]
+    [InlineData("CC(C)C", "CC(C)(C)Cl", StereoOutcome.None)]
+    [InlineData("CCC(C)O", "CCC(C)(O)Cl", StereoOutcome.Epimerised)]
+    [InlineData("CC1COC1", "CC1(Cl)COC1", StereoOutcome.None)]
+    public void Enumerate_CH_carbon_has_the_outcome_worked_out_by_hand(string substrate, string product, StereoOutcome expected)
+    {
+        string wanted = ProductIdentity.SmilesOf(SmilesReader.Parse(product));
+
+        Assert.Equal(expected, ProductEnumerator.Enumerate(SiteFinder.Find(SmilesReader.Parse(substrate)), 17).Products
+            .Single(one => one.CanonicalSmiles == wanted).Stereo);
+    }
+
     // Stereo outcome of the transposed products alone, in the order of their SMILES.
     [Theory]
     [InlineData("CC=C", "")]
