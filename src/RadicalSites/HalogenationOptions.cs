@@ -1,4 +1,5 @@
 using RadicalSites.Products;
+using RadicalSites.Selectivity;
 using RadicalSites.Thermochemistry;
 
 namespace RadicalSites;
@@ -15,6 +16,9 @@ public sealed record HalogenationOptions
 
     /// <summary>Table of bond dissociation enthalpies; the shipped one by default.</summary>
     public BdeTable Table { get; init; } = BdeTable.Default;
+
+    /// <summary>Fitted shifts of the selectivity parameters; the shipped fit by default.</summary>
+    public SelectivityCalibration Calibration { get; init; } = SelectivityCalibration.Default;
 
     /// <summary>How product stereo is written; existing centres kept and new ones unmarked by default.</summary>
     public ProductStereoMode Stereo { get; init; } = ProductStereoMode.Mark;

@@ -28,7 +28,7 @@ public sealed class HalogenationPredictor
         ArgumentNullException.ThrowIfNull(conditions);
         Conditions = conditions;
         Options = options ?? HalogenationOptions.Default;
-        model = new SelectivityModel(conditions, Options.Table);
+        model = new SelectivityModel(conditions, Options.Table, Options.Calibration);
         assigner = new BdeAssigner(Options.Table);
         productOptions = new ProductOptions { Stereo = Options.Stereo };
         sources = Halogenation.SourcesOf(conditions.Reagent);

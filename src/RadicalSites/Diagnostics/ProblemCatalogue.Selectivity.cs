@@ -57,9 +57,24 @@ public static partial class ProblemCatalogue
             "Substitution at the allylic site wins only at a very low halogen concentration.",
             "Use N-bromosuccinimide in a non-polar solvent, or add the halogen very slowly.");
 
+        /// <summary>Bound for a site without a rate.</summary>
+        public static readonly ProblemDescriptor ShareBound = new(
+            "share-bound", Severity.Info, "Bound for a site without data",
+            "Site {0} has no bond enthalpy and no share; if its hydrogens reacted as fast as the fastest rated ones it would take {1:F0} % and the other shares would shrink in proportion.",
+            "The table has no value for its bond.",
+            "Load a table with this bond, or read the shares as those of the rated sites alone.");
+
+        /// <summary>Deuterium competes.</summary>
+        public static readonly ProblemDescriptor DeuteriumCompetes = new(
+            "deuterium-competes", Severity.Info, "C-D bonds compete",
+            "The {0} takes deuterium or tritium in {1:F1} % of the abstractions (kH/kD = {2:F1} at 25 C); the shares are those of the hydrogens.",
+            "Bonds to heavy hydrogen break more slowly but not never.",
+            "Expect that part of the product to have lost its label.");
+
         internal static IReadOnlyList<ProblemDescriptor> Entries =>
         [
             ChainRefused, SlowChain, TemperatureRange, Statistical, Undecided, SolventWithoutEffect, AdditionCompetes,
+            ShareBound, DeuteriumCompetes,
         ];
     }
 }

@@ -16,14 +16,20 @@ public sealed record Carrier
     /// <summary>Evans-Polanyi slope for bonds stronger than the class anchor [dimensionless].</summary>
     public required double SlopeStrong { get; init; }
 
+    /// <summary>Whether the transition state is late (bond energies rule) rather than early (polarity rules).</summary>
+    public required bool HasLateTransitionState { get; init; }
+
     /// <summary>Change of ln k per unit of sigma-I on the neighbouring carbon at 298.15 K.</summary>
     public required double PolarBeta { get; init; }
 
-    /// <summary>Factor of the inductive term for each further carbon.</summary>
-    public required double Attenuation { get; init; }
+    /// <summary>Factor of the inductive term for each further carbon in the gas phase.</summary>
+    public required double AttenuationInGas { get; init; }
 
-    /// <summary>Scale of the terms of groups on the carbon itself, relative to the chlorine atom.</summary>
-    public required double PolarAlphaScale { get; init; }
+    /// <summary>Factor of the inductive term for each further carbon in a liquid.</summary>
+    public required double AttenuationInLiquid { get; init; }
+
+    /// <summary>Scale of the terms of groups on the carbon itself and beside it, relative to the table.</summary>
+    public required double PolarScale { get; init; }
 
     /// <summary>Hammett rho for benzylic sites at 353 K.</summary>
     public required double HammettRho { get; init; }
@@ -31,8 +37,14 @@ public sealed record Carrier
     /// <summary>Whether rho goes with sigma-plus instead of sigma.</summary>
     public required bool UsesSigmaPlus { get; init; }
 
-    /// <summary>Decrease of ln k for each branched or quaternary carbon beside the site.</summary>
+    /// <summary>Decrease of ln k for each heavy atom beyond the first that stands two bonds from the attacked carbon.</summary>
     public required double Steric { get; init; }
+
+    /// <summary>Highest rate per hydrogen relative to primary that collision or diffusion allows; 0 without a bound.</summary>
+    public required double Ceiling { get; init; }
+
+    /// <summary>Primary kinetic isotope effect kH/kD at 298.15 K; ln of it goes with 1/T.</summary>
+    public required double IsotopeEffect { get; init; }
 
     /// <summary>Relative standard deviation of a polar term.</summary>
     public required double PolarSigma { get; init; }

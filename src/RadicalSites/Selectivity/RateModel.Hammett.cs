@@ -5,12 +5,15 @@ namespace RadicalSites.Selectivity;
 
 internal sealed partial class RateModel
 {
-    /// <summary>rho times sigma of the substituents of benzene rings beside the site; ortho substituents do not count.</summary>
+    private const double LnOf10 = 2.302585092994046;
+
+    /// <summary>ln 10 times rho times sigma of the substituents of benzene rings beside the site; ortho substituents do not count.</summary>
     private double HammettTerm(Molecule molecule, Site site)
     {
         double sum = 0;
-        foreach (ConjugatedNeighbor neighbor in site.Conjugation)
+        for (int i = 0; i < site.Conjugation.Count; i++)
         {
+            ConjugatedNeighbor neighbor = site.Conjugation[i];
             if (neighbor.Kind != ConjugationKind.Benzylic || neighbor.PiAtoms.Count != 6)
             {
                 continue;
@@ -22,7 +25,7 @@ internal sealed partial class RateModel
             }
         }
 
-        return carrier.HammettRho * sum;
+        return LnOf10 * parameters.HammettRho * sum;
     }
 
     private double SubstituentSigma(Molecule molecule, int ringAtom, bool isPara)

@@ -16,10 +16,11 @@ internal sealed partial class RateModel
         double sum = 0;
         size = 0;
         int halogens = 0;
-        foreach (AlphaGroup group in site.AlphaGroups)
+        for (int i = 0; i < site.AlphaGroups.Count; i++)
         {
-            double term = SelectivityParameters.AlphaTerm(group.Kind) * carrier.PolarAlphaScale;
-            if (IsHalogen(group.Kind))
+            AlphaGroupKind kind = site.AlphaGroups[i].Kind;
+            double term = parameters.Alpha[(int)kind];
+            if (IsHalogen(kind))
             {
                 term = site.Conjugation.Count > 0
                     ? SideChainHalogenTerm(halogens++)
@@ -30,7 +31,7 @@ internal sealed partial class RateModel
             size += Math.Abs(term);
         }
 
-        sum += ChainTerm(molecule, site.Carbons[0], out double chainSize);
+        sum += ChainTerm(molecule, site, out double chainSize);
         size += chainSize;
         return sum;
     }
@@ -38,7 +39,7 @@ internal sealed partial class RateModel
     // Rate constants of chlorine atoms with the chloromethanes: the first halogen speeds methane up, further ones do not.
     private double HalogenTerm(SiteDegree degree, int before, double first) => (degree, before) switch
     {
-        (SiteDegree.Methyl, 0) => 1.87 * Math.Min(1, carrier.PolarAlphaScale),
+        (SiteDegree.Methyl, 0) => 1.87 * Math.Min(1, carrier.PolarScale),
         (SiteDegree.Methyl, 1) => 0,
         (SiteDegree.Methyl, _) => -0.35,
         (_, 0) => first,
@@ -55,59 +56,65 @@ internal sealed partial class RateModel
     private static int CountHalogens(Site site)
     {
         int count = 0;
-        foreach (AlphaGroup group in site.AlphaGroups)
+        for (int i = 0; i < site.AlphaGroups.Count; i++)
         {
-            count += IsHalogen(group.Kind) ? 1 : 0;
+            count += IsHalogen(site.AlphaGroups[i].Kind) ? 1 : 0;
         }
 
         return count;
     }
 
-    // Breadth-first over saturated and aromatic carbons; a group on a carbon n bonds away acts with attenuation^(n-1).
-    private double ChainTerm(Molecule molecule, int start, out double size)
+    // Breadth-first over saturated carbons; a group on a carbon n bonds away acts with attenuation^(n-1). A
+    // trifluoromethyl group is one group, not a carbon with three.
+    private double ChainTerm(Molecule molecule, Site site, out double size)
     {
         Span<int> carbons = stackalloc int[MostCarbons];
         Span<int> distances = stackalloc int[MostCarbons];
-        carbons[0] = start;
+        carbons[0] = site.Carbons[0];
         distances[0] = 0;
         int filled = 1;
-        double sigma = 0;
+        double induction = 0;
+        double beta = 0;
         for (int head = 0; head < filled; head++)
         {
             int carbon = carbons[head];
             int distance = distances[head];
-            if (distance == Reach)
-            {
-                break;
-            }
-
             foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
             {
                 int other = neighbor.Atom;
-                if (!IsChainCarbon(molecule, other) || carbons[..filled].IndexOf(other) >= 0)
+                if (carbons[..filled].Contains(other))
                 {
-                    if (distance > 0 && carbons[..filled].IndexOf(other) < 0)
-                    {
-                        sigma += Math.Pow(carrier.Attenuation, distance - 1) * GroupSigma(molecule, carbon, other);
-                    }
-
                     continue;
                 }
 
-                if (filled < MostCarbons)
+                if (IsChainCarbon(molecule, carbon, other))
                 {
-                    carbons[filled] = other;
-                    distances[filled++] = distance + 1;
+                    if (filled < MostCarbons && distance < Reach)
+                    {
+                        carbons[filled] = other;
+                        distances[filled++] = distance + 1;
+                    }
+                }
+                else if (distance > 0)
+                {
+                    induction += attenuation[distance] * GroupSigma(molecule, carbon, other, out double bridging);
+                    beta += distance == 1 ? bridging : 0;
                 }
             }
         }
 
-        double term = carrier.PolarBeta * sigma;
+        // Relief by a halogen beside the site needs a transition state with a developed radical: not a primary one.
+        if (site.Degree <= SiteDegree.Primary && !carrier.HasLateTransitionState)
+        {
+            beta = Math.Min(0, beta);
+        }
+
+        double term = (parameters.PolarBeta * induction) + beta;
         size = Math.Abs(term);
         return term;
     }
 
-    private static bool IsChainCarbon(Molecule molecule, int atom)
+    private static bool IsChainCarbon(Molecule molecule, int from, int atom)
     {
         Atom data = molecule.AtomSpan[atom];
         if (data.AtomicNumber != 6 || data.IsAromatic)
@@ -115,42 +122,63 @@ internal sealed partial class RateModel
             return false;
         }
 
+        int fluorines = 0;
         foreach (Neighbor neighbor in molecule.NeighborsOf(atom))
         {
             if (molecule.BondSpan[neighbor.Bond].Order != BondOrder.Single)
             {
                 return false;
             }
+
+            fluorines += molecule.AtomSpan[neighbor.Atom].AtomicNumber == 9 && neighbor.Atom != from ? 1 : 0;
         }
 
-        return true;
+        return fluorines < 3;
     }
 
-    private static double GroupSigma(Molecule molecule, int carbon, int atom)
+    private double GroupSigma(Molecule molecule, int carbon, int atom, out double bridging)
     {
+        bridging = 0;
         Atom data = molecule.AtomSpan[atom];
         if (data.AtomicNumber == 1)
         {
             return 0;
         }
 
-        return data.IsAromatic && data.AtomicNumber == 6
-            ? SelectivityParameters.ArylInductive
-            : AlphaGroupPerception.KindOf(molecule, carbon, atom) is { } kind
-                ? SelectivityParameters.SigmaInductive(kind)
-                : 0;
-    }
-
-    // Carbons beside the site that carry three or more further heavy atoms in all shield it from a bulky carrier.
-    private static int BranchesBeside(Molecule molecule, int carbon)
-    {
-        int branches = 0;
-        foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
+        if (data.IsAromatic && data.AtomicNumber == 6)
         {
-            int degree = molecule.DegreeOf(neighbor.Atom);
-            branches += molecule.AtomSpan[neighbor.Atom].IsAromatic ? 0 : degree >= 4 ? 2 : degree == 3 ? 1 : 0;
+            return SelectivityParameters.ArylInductive;
         }
 
-        return branches;
+        if (AlphaGroupPerception.KindOf(molecule, carbon, atom) is not { } kind)
+        {
+            return 0;
+        }
+
+        bridging = parameters.Beta[(int)kind];
+        return parameters.Sigma[(int)kind];
+    }
+
+    // Heavy atoms two bonds away beyond the first shield a site from a bulky carrier; tied back in a ring they count half,
+    // and aromatic rings are part of their class already.
+    private static double CrowdingOf(Molecule molecule, int carbon)
+    {
+        double count = -1;
+        foreach (Neighbor neighbor in molecule.NeighborsOf(carbon))
+        {
+            Atom other = molecule.AtomSpan[neighbor.Atom];
+            if (other.AtomicNumber == 1 || other.IsAromatic)
+            {
+                continue;
+            }
+
+            double weight = molecule.BondSpan[neighbor.Bond].IsInRing ? 0.5 : 1;
+            foreach (Neighbor second in molecule.NeighborsOf(neighbor.Atom))
+            {
+                count += second.Atom != carbon && molecule.AtomSpan[second.Atom].AtomicNumber > 1 ? weight : 0;
+            }
+        }
+
+        return Math.Max(0, count);
     }
 }

@@ -1,14 +1,14 @@
 using System;
 using RadicalSites.Molecules;
 using RadicalSites.Sites;
-using RadicalSites.Thermochemistry;
 
 namespace RadicalSites.Selectivity;
 
 /// <summary>Rate per hydrogen at one reagent and temperature; everything that depends on these alone is computed once.</summary>
 /// <remarks>
 /// ln k = class Arrhenius term + Evans-Polanyi term for the deviation of the bond from its class + polar terms of groups
-/// on the carbon (alpha) and along the chain (attenuated sigma-I) + Hammett term for ring substituents - steric term.
+/// on the carbon (alpha), beside it (beta) and along the chain (attenuated sigma-I) + Hammett term for ring substituents
+/// - steric term; bounded by the ceiling of the carrier.
 /// </remarks>
 internal sealed partial class RateModel
 {
@@ -25,74 +25,107 @@ internal sealed partial class RateModel
     private static readonly double[] Anchors = [438.9, 423, 411, 402, 378, 362, 352, 368, 355, 342];
 
     private readonly Carrier carrier;
+    private readonly CarrierParameters parameters;
     private readonly double kelvin;
     private readonly double inverseEnergy;
+    private readonly double polarScale;
+    private readonly double inverseCeiling;
     private readonly double[] classValue;
     private readonly double[] classSigma;
+    private readonly double[] attenuation = new double[Reach + 1];
 
-    internal RateModel(ReactionConditions conditions)
+    internal RateModel(ReactionConditions conditions, SelectivityCalibration calibration)
     {
         carrier = conditions.Reagent.Carrier;
+        parameters = new CarrierParameters(carrier, calibration);
         kelvin = conditions.Temperature.Kelvin;
         inverseEnergy = 1 / (GasConstant * kelvin);
-        (double factor, double factorSigma) = SelectivityParameters.Medium(conditions.Solvent, carrier);
-        double medium = 1 + ((factor - 1) * Reference / kelvin);
-        ClassRate[] rates = SelectivityParameters.RatesOf(carrier);
+        inverseCeiling = carrier.Ceiling > 0 ? 1 / carrier.Ceiling : 0;
+        MediumEffect effect = MediumEffect.Of(conditions.Solvent, carrier);
+        double medium = 1 + ((effect.Factor - 1) * Reference / kelvin);
+
+        // A complexed chlorine atom is slower and therefore more sensitive to polar effects too, though less than to the
+        // bond: half of the gain, set on the acids chlorinated in benzene and in tetrachloromethane.
+        polarScale = Reference / kelvin * (1 + (0.5 * Math.Max(0, medium - 1)));
+        ClassRate[] rates = parameters.Rates;
         classValue = new double[rates.Length];
         classSigma = new double[rates.Length];
         for (int i = 0; i < rates.Length; i++)
         {
             double value = rates[i].LnA + (rates[i].Kelvin / kelvin);
             classValue[i] = medium * value;
-            classSigma[i] = Math.Sqrt((rates[i].Sigma * rates[i].Sigma) + Square(factorSigma * value));
+            classSigma[i] = Math.Sqrt((rates[i].Sigma * rates[i].Sigma) + Square(effect.Sigma * value));
+        }
+
+        // Inductive effects reach further in a liquid than in a gas; without a word about the medium their mean is taken.
+        double factor = !effect.IsKnown ? 0.5 * (carrier.AttenuationInGas + parameters.AttenuationInLiquid)
+            : effect.IsGas ? carrier.AttenuationInGas
+            : parameters.AttenuationInLiquid;
+        attenuation[1] = 1;
+        for (int i = 2; i < attenuation.Length; i++)
+        {
+            attenuation[i] = attenuation[i - 1] * factor;
         }
     }
+
+    /// <summary>ln(kH/kD) at the temperature of the model.</summary>
+    internal double LnIsotopeEffect => Math.Log(carrier.IsotopeEffect) * Reference / kelvin;
 
     internal LnRate Rate(Molecule molecule, Site site, double bde, double bdeSigma)
     {
         RateClass rateClass = ClassOf(site);
         double value = classValue[(int)rateClass];
-
-        double deviation = bde - Anchors[(int)rateClass];
-        double slope = 0;
-        double energy = 0;
-        if (deviation < 0)
-        {
-            slope = carrier.SlopeWeak;
-            energy = deviation;
-        }
-        else if (deviation > StrongThreshold)
-        {
-            slope = carrier.SlopeStrong;
-            energy = deviation - StrongThreshold;
-        }
-
-        if ((rateClass == RateClass.Methyl && site.AlphaGroups.Count > 0)
-            || (site.Conjugation.Count > 0 && CountHalogens(site) > 0))
-        {
-            // Halomethanes and side-chain halides of arenes and alkenes: bond energy gives the wrong order there (benzyl
-            // chloride reacts more slowly than toluene in spite of its weaker bond), the alpha terms hold all of it.
-            slope = 0;
-        }
-        else if (HasAcceptor(site))
-        {
-            // Beside halogens and acceptors the bond is weak but the attack slow: for early transition states the alpha
-            // terms hold all of it, for late ones half of the bond's weakening counts.
-            slope *= carrier.SlopeWeak > 0.5 ? 0.5 : 0;
-        }
-
+        double slope = Slope(site, rateClass, bde - Anchors[(int)rateClass], out double energy);
         value -= slope * energy * inverseEnergy;
-        double polar = PolarTerm(molecule, site, out double polarSize) * Reference / kelvin;
+        double polar = polarScale * PolarTerm(molecule, site, out double polarSize);
         value += polar;
         double hammett = site.Conjugation.Count > 0 ? HammettTerm(molecule, site) * HammettReference / kelvin : 0;
         value += hammett;
-        double steric = carrier.Steric > 0 ? carrier.Steric * BranchesBeside(molecule, site.Carbons[0]) : 0;
+        double steric = parameters.Steric > 0 ? parameters.Steric * CrowdingOf(molecule, site.Carbons[0]) : 0;
         value -= steric;
 
         double own = Math.Sqrt(
-            Square(SiteScatter) + Square(carrier.PolarSigma * polarSize * Reference / kelvin)
+            Square(SiteScatter) + Square(carrier.PolarSigma * polarSize * polarScale)
             + Square(0.3 * hammett) + Square(0.5 * steric));
-        return new LnRate(value, rateClass, classSigma[(int)rateClass], slope * bdeSigma * inverseEnergy, own);
+
+        // At the ceiling every encounter reacts: k = 1 / (1/k + 1/ceiling), and what moves k moves the result less. The class
+        // itself was measured under that bound, so only what lies beyond the class is damped.
+        double damping = 1 / (1 + (Math.Exp(Math.Min(value, 500)) * inverseCeiling));
+        double undamped = 1 + (Math.Exp(Math.Min(classValue[(int)rateClass], 500)) * inverseCeiling);
+        return new LnRate(
+            value + Math.Log(damping * undamped), rateClass, damping * classSigma[(int)rateClass],
+            damping * slope * bdeSigma * inverseEnergy, damping * own);
+    }
+
+    /// <summary>Bond enthalpy of the class of a site [kJ/mol].</summary>
+    internal static double AnchorOf(Site site) => Anchors[(int)ClassOf(site)];
+
+    private double Slope(Site site, RateClass rateClass, double deviation, out double energy)
+    {
+        energy = 0;
+        bool onHalogen = (rateClass == RateClass.Methyl && site.AlphaGroups.Count > 0)
+            || (site.Conjugation.Count > 0 && CountHalogens(site) > 0);
+        if (onHalogen || (!carrier.HasLateTransitionState && HasAcceptor(site)))
+        {
+            // Halomethanes, side-chain halides and, for early transition states, all carbons beside acceptors: the bond
+            // energy gives the wrong order there (benzyl chloride reacts more slowly than toluene in spite of its weaker
+            // bond), the alpha terms hold all of it.
+            return 0;
+        }
+
+        if (deviation < 0)
+        {
+            energy = deviation;
+            return parameters.SlopeWeak;
+        }
+
+        if (deviation > StrongThreshold)
+        {
+            energy = deviation - StrongThreshold;
+            return carrier.SlopeStrong;
+        }
+
+        return 0;
     }
 
     private static double Square(double value) => value * value;
@@ -100,9 +133,9 @@ internal sealed partial class RateModel
     private static RateClass ClassOf(Site site)
     {
         int degree = Math.Min(3, (int)site.Degree);
-        foreach (ConjugatedNeighbor neighbor in site.Conjugation)
+        for (int i = 0; i < site.Conjugation.Count; i++)
         {
-            if (neighbor.Kind is ConjugationKind.Allylic or ConjugationKind.Propargylic)
+            if (site.Conjugation[i].Kind is ConjugationKind.Allylic or ConjugationKind.Propargylic)
             {
                 return (RateClass)((int)RateClass.Allylic1 + Math.Max(0, degree - 1));
             }
@@ -115,9 +148,9 @@ internal sealed partial class RateModel
 
         // A donor heteroatom counts as a further alkyl group; its own effect is in the bond energy and the alpha term.
         int donors = 0;
-        foreach (AlphaGroup group in site.AlphaGroups)
+        for (int i = 0; i < site.AlphaGroups.Count; i++)
         {
-            donors += IsDonor(group.Kind) ? 1 : 0;
+            donors += IsDonor(site.AlphaGroups[i].Kind) ? 1 : 0;
         }
 
         return (RateClass)Math.Min(3, degree + donors);
@@ -125,9 +158,9 @@ internal sealed partial class RateModel
 
     private static bool HasAcceptor(Site site)
     {
-        foreach (AlphaGroup group in site.AlphaGroups)
+        for (int i = 0; i < site.AlphaGroups.Count; i++)
         {
-            if (!IsDonor(group.Kind))
+            if (!IsDonor(site.AlphaGroups[i].Kind))
             {
                 return true;
             }

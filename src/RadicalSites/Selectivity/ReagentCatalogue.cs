@@ -39,8 +39,9 @@ public static class ReagentCatalogue
         internal static readonly Carrier[] Carriers =
         [
             .. CsvTable.ReadEmbedded(
-                "carriers.csv", "id", "name", "epsilon_weak", "epsilon_strong", "polar_beta", "attenuation",
-                "polar_alpha_scale", "hammett_rho", "hammett_scale", "steric", "sigma_polar", "source", "locator")
+                "carriers.csv", "id", "name", "epsilon_weak", "epsilon_strong", "transition_state", "polar_beta", "attenuation_gas",
+                "attenuation_liquid", "polar_scale", "hammett_rho", "hammett_scale", "steric", "ceiling", "isotope_effect",
+                "sigma_polar", "source", "locator")
                 .Rows.Select(static row => new Carrier
                 {
                     Id = row.Required("id"),
@@ -48,11 +49,15 @@ public static class ReagentCatalogue
                     SlopeWeak = row.Number("epsilon_weak", 0, 2),
                     SlopeStrong = row.Number("epsilon_strong", 0, 2),
                     PolarBeta = row.Number("polar_beta", -20, 20),
-                    Attenuation = row.Number("attenuation", 0, 1),
-                    PolarAlphaScale = row.Number("polar_alpha_scale", 0, 5),
+                    HasLateTransitionState = row.Required("transition_state") == "late",
+                    AttenuationInGas = row.Number("attenuation_gas", 0, 1),
+                    AttenuationInLiquid = row.Number("attenuation_liquid", 0, 1),
+                    PolarScale = row.Number("polar_scale", 0, 5),
                     HammettRho = row.Number("hammett_rho", -5, 5),
                     UsesSigmaPlus = row.Required("hammett_scale") == "sigma+",
                     Steric = row.Number("steric", 0, 5),
+                    Ceiling = row.Number("ceiling", 0, 1e6),
+                    IsotopeEffect = row.Number("isotope_effect", 1, 20),
                     PolarSigma = row.Number("sigma_polar", 0, 2),
                     Source = row.Required("source"),
                 }),

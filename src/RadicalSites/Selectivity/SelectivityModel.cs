@@ -1,6 +1,5 @@
 using System;
 using System.Collections.Generic;
-using RadicalSites.Molecules;
 using RadicalSites.Sites;
 using RadicalSites.Thermochemistry;
 
@@ -22,16 +21,21 @@ public sealed class SelectivityModel
     /// <summary>Prepares the model.</summary>
     /// <param name="conditions">Reagent, temperature and solvent.</param>
     /// <param name="table">Table with the bond enthalpies of the reagent's bonds; the shipped one when not given.</param>
-    public SelectivityModel(ReactionConditions conditions, BdeTable? table = null)
+    /// <param name="calibration">Fitted shifts of the parameters; the shipped fit when not given.</param>
+    public SelectivityModel(ReactionConditions conditions, BdeTable? table = null, SelectivityCalibration? calibration = null)
     {
         ArgumentNullException.ThrowIfNull(conditions);
         Conditions = conditions;
-        rates = new RateModel(conditions);
+        Calibration = calibration ?? SelectivityCalibration.Default;
+        rates = new RateModel(conditions, Calibration);
         propagation = new PropagationModel(conditions.Reagent, table ?? BdeTable.Default);
     }
 
     /// <summary>The conditions.</summary>
     public ReactionConditions Conditions { get; }
+
+    /// <summary>The fitted shifts in use.</summary>
+    public SelectivityCalibration Calibration { get; }
 
     /// <summary>Evaluates all sites of a molecule.</summary>
     /// <param name="analysis">The molecule with its sites.</param>
@@ -57,8 +61,49 @@ public sealed class SelectivityModel
         }
 
         var lnRates = new LnRate[sites.Count];
+        double[] weights = Weights(analysis, assignments, propagates, lnRates, out double largest);
+        double deuterium = propagates && sites.Count > 0
+            ? DeuteriumCompetition.WeightOf(rates, analysis, lnRates, largest)
+            : 0;
+        double sum = 0;
+        foreach (double weight in weights)
+        {
+            sum += double.IsNaN(weight) ? 0 : weight;
+        }
+
+        for (int i = 0; i < weights.Length; i++)
+        {
+            weights[i] /= sum;
+        }
+
+        double deuteriumShare = sum > 0 && deuterium > 0 ? deuterium / (deuterium + sum) : 0;
+        return new SelectivityResult(Conditions, analysis, assignments, steps, lnRates, weights, propagates, deuteriumShare);
+    }
+
+    /// <summary>Shares alone, for fitting: no steps, intervals or remarks.</summary>
+    internal double[] Shares(SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments)
+    {
+        double[] weights = Weights(analysis, assignments, true, new LnRate[assignments.Count], out _);
+        double sum = 0;
+        foreach (double weight in weights)
+        {
+            sum += double.IsNaN(weight) ? 0 : weight;
+        }
+
+        for (int i = 0; i < weights.Length; i++)
+        {
+            weights[i] /= sum;
+        }
+
+        return weights;
+    }
+
+    private double[] Weights(
+        SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments, bool propagates, LnRate[] lnRates, out double largest)
+    {
+        IReadOnlyList<Site> sites = analysis.Sites;
         var weights = new double[sites.Count];
-        double largest = double.NegativeInfinity;
+        largest = double.NegativeInfinity;
         for (int i = 0; i < lnRates.Length; i++)
         {
             BdeAssignment bde = assignments[i];
@@ -69,20 +114,13 @@ public sealed class SelectivityModel
             }
         }
 
-        double sum = 0;
         for (int i = 0; i < weights.Length; i++)
         {
             weights[i] = assignments[i].KilojoulesPerMole is null || !propagates
                 ? double.NaN
                 : sites[i].HydrogenCount * Math.Exp(lnRates[i].Value - largest);
-            sum += double.IsNaN(weights[i]) ? 0 : weights[i];
         }
 
-        for (int i = 0; i < weights.Length; i++)
-        {
-            weights[i] /= sum;
-        }
-
-        return new SelectivityResult(Conditions, analysis, assignments, steps, lnRates, weights, propagates);
+        return weights;
     }
 }

@@ -7,22 +7,20 @@ using RadicalSites.Sites;
 
 namespace RadicalSites.Selectivity;
 
-/// <summary>The parameter tables of the selectivity model, read once.</summary>
+/// <summary>The parameter tables of the selectivity model, read once; what was fitted lies on top as shifts.</summary>
 internal static class SelectivityParameters
 {
     /// <summary>Names of the rate classes, in the order of <see cref="RateClass"/>.</summary>
     internal static readonly string[] ClassNames = Enum.GetNames<RateClass>();
 
-    private static readonly int AlphaCount = Enum.GetValues<AlphaGroupKind>().Length;
+    /// <summary>Number of kinds of groups.</summary>
+    internal static readonly int GroupCount = Enum.GetValues<AlphaGroupKind>().Length;
 
-    /// <summary>Parameters of all rate classes of a carrier, by class.</summary>
+    /// <summary>Parameters of all rate classes of a carrier, by class, as the table has them.</summary>
     internal static ClassRate[] RatesOf(Carrier carrier) => Tables.Rates[carrier.Id];
 
-    /// <summary>Sigma-I of a group.</summary>
-    internal static double SigmaInductive(AlphaGroupKind kind) => Tables.SigmaInductive[(int)kind];
-
-    /// <summary>Change of ln k of the carbon that carries a group, for the chlorine atom at 298.15 K.</summary>
-    internal static double AlphaTerm(AlphaGroupKind kind) => Tables.Alpha[(int)kind];
+    /// <summary>Row of the table of polar groups.</summary>
+    internal static PolarGroup Group(AlphaGroupKind kind) => Tables.Groups[(int)kind];
 
     /// <summary>Sigma-I of an aryl group.</summary>
     internal static double ArylInductive => Tables.Aryl;
@@ -30,17 +28,13 @@ internal static class SelectivityParameters
     /// <summary>Hammett constants of a group name, or null.</summary>
     internal static HammettConstants? Hammett(string group) => Tables.Hammett.GetValueOrDefault(group);
 
-    /// <summary>Factor on ln(relative rate) for a complexing solvent and its standard deviation; 1 and 0 otherwise.</summary>
-    internal static (double Factor, double Sigma) Medium(string? solvent, Carrier carrier) =>
-        solvent is not null && Tables.Media.TryGetValue((solvent.ToUpperInvariant(), carrier.Id), out (double, double) found)
-            ? found
-            : (1, 0);
+    /// <summary>Row of a solvent, or null; case is ignored.</summary>
+    internal static MediumRow? Medium(string solvent) => Tables.Media.GetValueOrDefault(solvent);
 
     private static class Tables
     {
         internal static readonly FrozenDictionary<string, ClassRate[]> Rates = ReadRates();
-        internal static readonly double[] SigmaInductive = new double[AlphaCount];
-        internal static readonly double[] Alpha = new double[AlphaCount];
+        internal static readonly PolarGroup[] Groups = new PolarGroup[GroupCount];
         internal static readonly double Aryl = ReadPolar();
 
         internal static readonly FrozenDictionary<string, HammettConstants> Hammett = CsvTable
@@ -48,11 +42,17 @@ internal static class SelectivityParameters
             .ToFrozenDictionary(static row => row.Required("group"), static row => new HammettConstants(
                 row.Number("meta", -3, 3), row.Number("para", -3, 3), row.Number("para_plus", -3, 3)));
 
-        internal static readonly FrozenDictionary<(string Solvent, string Carrier), (double Factor, double Sigma)> Media = CsvTable
-            .ReadEmbedded("media.csv", "solvent", "carrier", "factor", "sigma_factor", "source", "locator").Rows
+        internal static readonly FrozenDictionary<string, MediumRow> Media = CsvTable
+            .ReadEmbedded(
+                "media.csv", "solvent", "phase", "carrier", "base", "gain", "half_molar", "neat_molar", "sigma_factor",
+                "source", "locator").Rows
             .ToFrozenDictionary(
-                static row => (row.Required("solvent").ToUpperInvariant(), row.Required("carrier")),
-                static row => (row.Number("factor", 0.1, 10), row.Number("sigma_factor", 0, 5)));
+                static row => row.Required("solvent"),
+                static row => new MediumRow(
+                    row.Required("carrier"), row.Required("phase") == "gas", row.Number("base", 0.1, 10),
+                    row.Number("gain", 0, 20), row.Number("half_molar", 0.01, 1000), row.Number("neat_molar", 0.01, 100),
+                    row.Number("sigma_factor", 0, 5)),
+                StringComparer.OrdinalIgnoreCase);
 
         private static FrozenDictionary<string, ClassRate[]> ReadRates()
         {
@@ -77,7 +77,9 @@ internal static class SelectivityParameters
         private static double ReadPolar()
         {
             double aryl = 0;
-            foreach (CsvRow row in CsvTable.ReadEmbedded("polar_groups.csv", "group", "sigma_inductive", "alpha", "note").Rows)
+            CsvTable table = CsvTable.ReadEmbedded(
+                "polar_groups.csv", "group", "sigma_inductive", "alpha_early", "alpha_late", "beta_early", "beta_late", "note");
+            foreach (CsvRow row in table.Rows)
             {
                 double sigma = row.Number("sigma_inductive", -2, 2);
                 if (row.Required("group") == "Aryl")
@@ -86,9 +88,9 @@ internal static class SelectivityParameters
                 }
                 else if (row.Required("group") != "Vinyl")
                 {
-                    int kind = (int)row.Choice<AlphaGroupKind>("group");
-                    SigmaInductive[kind] = sigma;
-                    Alpha[kind] = row.Number("alpha", -20, 20);
+                    Groups[(int)row.Choice<AlphaGroupKind>("group")] = new PolarGroup(
+                        sigma, row.Number("alpha_early", -20, 20), row.Number("alpha_late", -20, 20),
+                        row.Number("beta_early", -20, 20), row.Number("beta_late", -20, 20));
                 }
             }
 

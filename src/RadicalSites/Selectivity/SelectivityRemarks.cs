@@ -16,8 +16,9 @@ internal static class SelectivityRemarks
 
     internal static IReadOnlyList<Diagnostic> Of(
         ReactionConditions conditions, SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments,
-        SiteSelectivity[] sites, bool propagates)
+        SelectivityResult result)
     {
+        IReadOnlyList<SiteSelectivity> sites = result.Sites;
         var remarks = new List<Diagnostic>();
         Reagent reagent = conditions.Reagent;
         for (int i = 0; i < assignments.Count; i++)
@@ -28,7 +29,7 @@ internal static class SelectivityRemarks
             }
         }
 
-        if (!propagates)
+        if (!result.Propagates)
         {
             Refused(remarks, reagent, sites);
             return remarks;
@@ -40,18 +41,25 @@ internal static class SelectivityRemarks
                 Entry.TemperatureRange, [], conditions.Temperature.Celsius, reagent.Id, reagent.Minimum.Celsius, reagent.Maximum.Celsius));
         }
 
-        if (conditions.Solvent is { } solvent && SelectivityParameters.Medium(solvent, reagent.Carrier) is (1, 0))
+        if (conditions.Solvent is { } solvent && !MediumEffect.Of(solvent, reagent.Carrier).IsKnown)
         {
             remarks.Add(Diagnostic.Create(Entry.SolventWithoutEffect, [], solvent, reagent.Carrier.Name));
         }
 
         Chain(remarks, sites);
+        Unrated(remarks, analysis, sites);
+        if (result.DeuteriumShare > 0)
+        {
+            remarks.Add(Diagnostic.Create(
+                Entry.DeuteriumCompetes, [], reagent.Carrier.Name, 100 * result.DeuteriumShare, reagent.Carrier.IsotopeEffect));
+        }
+
         Addition(remarks, analysis, reagent);
         Spread(remarks, analysis, sites);
         return remarks;
     }
 
-    private static void Refused(List<Diagnostic> remarks, Reagent reagent, SiteSelectivity[] sites)
+    private static void Refused(List<Diagnostic> remarks, Reagent reagent, IReadOnlyList<SiteSelectivity> sites)
     {
         SiteSelectivity? best = null;
         foreach (SiteSelectivity site in sites)
@@ -71,9 +79,9 @@ internal static class SelectivityRemarks
         }
     }
 
-    private static void Chain(List<Diagnostic> remarks, SiteSelectivity[] sites)
+    private static void Chain(List<Diagnostic> remarks, IReadOnlyList<SiteSelectivity> sites)
     {
-        bool slow = sites.Length > 0;
+        bool slow = sites.Count > 0;
         foreach (SiteSelectivity site in sites)
         {
             slow &= site.Steps.Verdict is ChainVerdict.Slow or ChainVerdict.Refused;
@@ -82,6 +90,30 @@ internal static class SelectivityRemarks
         if (slow)
         {
             remarks.Add(Diagnostic.Create(Entry.SlowChain, []));
+        }
+    }
+
+    // A site without a rate cannot react faster than the fastest rated hydrogen by more than nobody knows; as fast as it is
+    // the bound named to the reader.
+    private static void Unrated(List<Diagnostic> remarks, SiteAnalysis analysis, IReadOnlyList<SiteSelectivity> sites)
+    {
+        double fastest = 0;
+        double sum = 0;
+        for (int i = 0; i < sites.Count; i++)
+        {
+            double rate = sites[i].RelativeRatePerHydrogen ?? 0;
+            fastest = Math.Max(fastest, rate);
+            sum += rate * analysis.Sites[i].HydrogenCount;
+        }
+
+        for (int i = 0; i < sites.Count && fastest > 0; i++)
+        {
+            if (sites[i].Share is null)
+            {
+                double weight = fastest * analysis.Sites[i].HydrogenCount;
+                remarks.Add(Diagnostic.Create(
+                    Entry.ShareBound, analysis.Sites[i].Carbons, sites[i].SiteNumber, 100 * weight / (sum + weight)));
+            }
         }
     }
 
@@ -105,14 +137,14 @@ internal static class SelectivityRemarks
         }
     }
 
-    private static void Spread(List<Diagnostic> remarks, SiteAnalysis analysis, SiteSelectivity[] sites)
+    private static void Spread(List<Diagnostic> remarks, SiteAnalysis analysis, IReadOnlyList<SiteSelectivity> sites)
     {
         double least = double.PositiveInfinity;
         double most = 0;
         int rated = 0;
         int first = -1;
         int second = -1;
-        for (int i = 0; i < sites.Length; i++)
+        for (int i = 0; i < sites.Count; i++)
         {
             if (sites[i].RelativeRatePerHydrogen is not { } rate)
             {

@@ -10,23 +10,16 @@ namespace RadicalSites.Selectivity;
 /// <remarks>Immutable and safe for use by many threads.</remarks>
 public sealed class SelectivityResult
 {
-    // Two-sided 90 % of the normal distribution.
-    private const double Quantile90 = 1.6448536269514722;
-
-    private readonly LnRate[] lnRates;
-    private readonly double[] shares;
-    private readonly IReadOnlyList<BdeAssignment> assignments;
+    private readonly ShareIntervals intervals;
 
     internal SelectivityResult(
         ReactionConditions conditions, SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments,
-        StepEnthalpies[] steps, LnRate[] lnRates, double[] shares, bool propagates)
+        StepEnthalpies[] steps, LnRate[] lnRates, double[] shares, bool propagates, double deuteriumShare)
     {
-        this.lnRates = lnRates;
-        this.shares = shares;
-        this.assignments = assignments;
+        intervals = new ShareIntervals(lnRates, shares, assignments);
         Propagates = propagates;
+        DeuteriumShare = deuteriumShare;
         var sites = new SiteSelectivity[steps.Length];
-        Span<int> one = stackalloc int[1];
         for (int i = 0; i < sites.Length; i++)
         {
             int number = analysis.Sites[i].Number;
@@ -36,13 +29,12 @@ public sealed class SelectivityResult
                 continue;
             }
 
-            one[0] = number;
-            (double low, double high) = IntervalOf(one);
+            (double low, double high) = intervals.Of(i);
             sites[i] = new SiteSelectivity(number, Math.Exp(lnRates[i].Value), shares[i], low, high, steps[i]);
         }
 
         Sites = sites;
-        Diagnostics = SelectivityRemarks.Of(conditions, analysis, assignments, sites, propagates);
+        Diagnostics = SelectivityRemarks.Of(conditions, analysis, assignments, this);
     }
 
     /// <summary>One entry for each site, in the order of the sites.</summary>
@@ -51,6 +43,12 @@ public sealed class SelectivityResult
     /// <summary>Whether the chain propagates at any site; when not, no shares are given.</summary>
     public bool Propagates { get; }
 
+    /// <summary>
+    /// Part of all abstraction that takes deuterium or tritium instead of a hydrogen, 0 to 1; the shares of the sites
+    /// are those of the rest.
+    /// </summary>
+    public double DeuteriumShare { get; }
+
     /// <summary>Remarks; may be empty.</summary>
     public IReadOnlyList<Diagnostic> Diagnostics { get; }
 
@@ -58,107 +56,5 @@ public sealed class SelectivityResult
     /// <param name="sites">1-based numbers of sites with a share, each once.</param>
     /// <returns>Lower and upper end, 0 to 1, around the sum.</returns>
     /// <exception cref="ArgumentException">A site does not exist or has no share.</exception>
-    public (double Low, double High) IntervalOf(ReadOnlySpan<int> sites)
-    {
-        double inside = 0;
-        foreach (int number in sites)
-        {
-            if (number < 1 || number > shares.Length || double.IsNaN(shares[number - 1]))
-            {
-                throw new ArgumentException("Only sites with a share have an interval.", nameof(sites));
-            }
-
-            inside += shares[number - 1];
-        }
-
-        double outside = 1 - inside;
-        if (inside <= 0 || outside <= 1e-15)
-        {
-            return (Math.Clamp(inside, 0, 1), Math.Clamp(inside, 0, 1));
-        }
-
-        double sigma = Math.Sqrt(LogitVariance(sites, inside, outside));
-        double logit = Math.Log(inside / outside);
-        return (Logistic(logit - (Quantile90 * sigma)), Logistic(logit + (Quantile90 * sigma)));
-    }
-
-    private static double Logistic(double value) => 1 / (1 + Math.Exp(-value));
-
-    // Sensitivity of the logit to ln k of site i: its weight within the set, or minus its weight outside. Errors of one
-    // class, and of one row of the bond table, are common to the sites that use it, so their sensitivities add first.
-    private double LogitVariance(ReadOnlySpan<int> sites, double inside, double outside)
-    {
-        int count = shares.Length;
-        double[]? rented = count > 128 ? new double[count] : null;
-        Span<double> sensitivity = rented ?? stackalloc double[count];
-        for (int i = 0; i < count; i++)
-        {
-            sensitivity[i] = double.IsNaN(shares[i]) ? 0 : -shares[i] / outside;
-        }
-
-        foreach (int number in sites)
-        {
-            sensitivity[number - 1] = shares[number - 1] / inside;
-        }
-
-        double variance = 0;
-        Span<double> classSums = stackalloc double[SelectivityParameters.ClassNames.Length];
-        Span<double> classSigmas = stackalloc double[classSums.Length];
-        classSums.Clear();
-        for (int i = 0; i < count; i++)
-        {
-            LnRate rate = lnRates[i];
-            double own = sensitivity[i] * rate.OwnSigma;
-            variance += own * own;
-            classSums[(int)rate.Class] += sensitivity[i];
-            classSigmas[(int)rate.Class] = rate.ClassSigma;
-        }
-
-        for (int c = 0; c < classSums.Length; c++)
-        {
-            double part = classSums[c] * classSigmas[c];
-            variance += part * part;
-        }
-
-        return variance + BondVariance(sensitivity);
-    }
-
-    private double BondVariance(ReadOnlySpan<double> sensitivity)
-    {
-        double variance = 0;
-        for (int i = 0; i < sensitivity.Length; i++)
-        {
-            string row = assignments[i].CommonErrorRow;
-            if (row.Length == 0 || SeenBefore(row, i))
-            {
-                continue;
-            }
-
-            double sum = 0;
-            for (int j = i; j < sensitivity.Length; j++)
-            {
-                if (assignments[j].CommonErrorRow == row)
-                {
-                    sum += sensitivity[j] * lnRates[j].BdeSigma;
-                }
-            }
-
-            variance += sum * sum;
-        }
-
-        return variance;
-    }
-
-    private bool SeenBefore(string row, int index)
-    {
-        for (int i = 0; i < index; i++)
-        {
-            if (assignments[i].CommonErrorRow == row)
-            {
-                return true;
-            }
-        }
-
-        return false;
-    }
+    public (double Low, double High) IntervalOf(ReadOnlySpan<int> sites) => intervals.Of(sites);
 }
