@@ -37,6 +37,14 @@ internal sealed class ChemistryOptions
         command.Options.Add(solvent);
     }
 
+    internal void AddMedium(Command command)
+    {
+        command.Options.Add(temperature);
+        command.Options.Add(solvent);
+    }
+
+    internal void AddTable(Command command) => command.Options.Add(table);
+
     internal void AddData(Command command)
     {
         command.Options.Add(table);

@@ -7,6 +7,10 @@ internal static class CommandExamples
 {
     internal static readonly Dictionary<string, string> ByCommand = new()
     {
+        ["completion"] = "  radicalsites completion bash > ~/.local/share/bash-completion/completions/radicalsites\n  radicalsites completion fish | source",
+        ["conditions"] = "  radicalsites conditions CCC --want 'CC(C)Br'\n  radicalsites conditions 'CC(C)C' --want 'CC(C)CCl' --temperature 25C --format json",
+        ["course"] = "  radicalsites course 'Cc1ccccc1' --reagent Cl2 --temperature 100C\n  radicalsites course C --reagent Cl2 --equivalents 4 --format json",
+        ["heat"] = "  radicalsites heat 'Cc1ccccc1' --reagent Br2 --batch 10g --solvent CCl4 --solvent-volume 100 --temperature 70C\n  radicalsites heat CCC --reagent Cl2 --batch 0.5mol --format json",
         ["convert"] = "  radicalsites convert 'OCC'\n  radicalsites convert molecules.smi --order input",
         ["data"] = "  radicalsites data bde 'CC(C)C'\n  radicalsites data sources ATCT",
         ["explain"] = "  radicalsites explain smiles-ring-unclosed\n  radicalsites explain --all",

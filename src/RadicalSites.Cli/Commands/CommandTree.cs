@@ -17,9 +17,13 @@ internal static class CommandTree
         root.Subcommands.Add(SitesCommand.Build(host));
         root.Subcommands.Add(PredictCommand.Build(host));
         root.Subcommands.Add(IsomersCommand.Build(host));
+        root.Subcommands.Add(CourseCommand.Build(host));
+        root.Subcommands.Add(ConditionsCommand.Build(host));
+        root.Subcommands.Add(HeatCommand.Build(host));
         root.Subcommands.Add(ConvertCommand.Build(host));
         root.Subcommands.Add(DataCommand.Build(host));
         root.Subcommands.Add(ExplainCommand.Build(host));
+        root.Subcommands.Add(CompletionCommand.Build());
         return root;
     }
 }

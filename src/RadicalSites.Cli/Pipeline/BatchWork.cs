@@ -54,7 +54,19 @@ internal sealed class BatchWork : IDisposable
                 return;
             }
 
-            bool isOk = Compute(writer, record);
+            int before = Output.Length;
+            bool isOk;
+            try
+            {
+                isOk = Compute(writer, record);
+            }
+            catch (OperationCanceledException) when (cancellation.IsCancellationRequested)
+            {
+                // A long calculation gives up in its middle; the record is not done.
+                Output.Truncate(before);
+                return;
+            }
+
             Completed++;
             if (!isOk && stopOnError)
             {
@@ -79,8 +91,12 @@ internal sealed class BatchWork : IDisposable
                 return true;
             }
         }
+        catch (MoleculeFormatException refusal)
+        {
+            problem = refusal.Problem;
+        }
 #pragma warning disable CA1031 // One record that trips over a mistake of the program must not take the others with it.
-        catch (Exception mistake) when (mistake is not ToolException)
+        catch (Exception mistake) when (mistake is not (ToolException or OperationCanceledException))
 #pragma warning restore CA1031
         {
             HadInternalError = true;

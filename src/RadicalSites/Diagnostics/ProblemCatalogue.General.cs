@@ -29,6 +29,13 @@ public static partial class ProblemCatalogue
             "A mistake in the program, not in the input.",
             "Report it with the input; the other records are not affected.");
 
-        internal static IReadOnlyList<ProblemDescriptor> Entries => [NoSites, LimitReached, Internal];
+        /// <summary>The wanted product does not come from the substrate by one halogenation.</summary>
+        public static readonly ProblemDescriptor NotAProduct = new(
+            "wanted-not-a-product", Severity.Error, "Not a product of this substrate",
+            "{0} is no product of one halogenation of {1} with any reagent of the table.",
+            "It differs in more than one halogen, or the halogen stands on a carbon that is no site.",
+            "Compare with the list that the command isomers gives.");
+
+        internal static IReadOnlyList<ProblemDescriptor> Entries => [NoSites, LimitReached, Internal, NotAProduct];
     }
 }

@@ -85,8 +85,24 @@ public static partial class ProblemCatalogue
             "The enthalpies of later steps differ by some 10 kJ/mol.",
             "See the course of the halogenation for the composition.");
 
+        /// <summary>The exchange between an N-halogen imide and HX is not counted.</summary>
+        public static readonly ProblemDescriptor ExchangeNotCounted = new(
+            "heat-exchange-not-counted", Severity.Danger, "More heat than counted",
+            "The balance counts the chain through {1} only; the exchange of {0} with HX, which makes that halogen, releases further heat that is not in it.",
+            "No bond enthalpy of the imide with a source is in the tables, and none is guessed.",
+            "Take the figures as a lower bound and measure the heat of the batch by calorimetry.");
+
+        /// <summary>The substrate has no molar mass.</summary>
+        public static readonly ProblemDescriptor NoMolarMass = new(
+            "heat-no-molar-mass", Severity.Error, "No molar mass",
+            "The substrate has no molar mass, so no batch of it can be reckoned.",
+            "It is empty, or holds an atom without a standard atomic weight such as the wildcard.",
+            "Give a complete molecule of elements with a standard atomic weight.");
+
         internal static IReadOnlyList<ProblemDescriptor> Entries =>
         [
+            NoMolarMass,
+            ExchangeNotCounted,
             StandingNote, PassesBoilingPoint, LargeRise, Gas, Induction, Initiator, Reagent, Solvent, NoEnthalpy, Neat,
             ExcessHalogen,
         ];

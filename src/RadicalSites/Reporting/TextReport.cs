@@ -15,7 +15,7 @@ namespace RadicalSites.Reporting;
 
 /// <summary>Writes reports as plain text for people: job line, tables, remarks.</summary>
 /// <remarks>Values are rounded for reading; the machine formats keep all digits. Stateless and safe for use by many threads.</remarks>
-public static class TextReport
+public static partial class TextReport
 {
     /// <summary>Writes the sites of a molecule.</summary>
     /// <param name="writer">Where to write.</param>
@@ -52,9 +52,7 @@ public static class TextReport
         ArgumentNullException.ThrowIfNull(prediction);
         ReactionConditions conditions = prediction.Conditions;
         Head(writer, source, prediction.CanonicalSmiles, prediction.Molecule);
-        writer.Write(string.Create(
-            CultureInfo.InvariantCulture,
-            $"{conditions.Reagent.Name} ({conditions.Reagent.Id}), {conditions.Temperature.Celsius:F0} C, carrier: {conditions.Reagent.Carrier.Name}{(conditions.Solvent is null ? "" : ", solvent " + conditions.Solvent)} (data {prediction.DataVersion})\n\n"));
+        Job(writer, conditions, prediction.DataVersion);
         var table = new TextTable("site", ">H", "class", ">C-H kJ/mol", ">step 1", ">step 2", ">rate/H", ">share", ">90 %");
         foreach (SitePrediction entry in prediction.Sites)
         {
