@@ -47,7 +47,8 @@ internal sealed class AutomorphismProbe
             }
         }
 
-        return IsClosed() && BondsHold(graph) && (graph.ElementCount == 0 || ElementsHold(graph));
+        return IsClosed() && BondsHold(graph) && (graph.ElementCount == 0 || ElementsHold(graph))
+            && (graph.BodyCount == 0 || BodiesHold(graph));
     }
 
     private void Begin(int n)
@@ -228,6 +229,19 @@ internal sealed class AutomorphismProbe
         for (int e = 0; e < graph.ElementCount; e++)
         {
             if (!(graph.Kind[e] == SymmetryGraph.Axis ? AxisHolds(graph, e) : CenterHolds(graph, e)))
+            {
+                return false;
+            }
+        }
+
+        return true;
+    }
+
+    private bool BodiesHold(SymmetryGraph graph)
+    {
+        for (int body = 0; body < graph.BodyCount; body++)
+        {
+            if (!graph.BodyHolds(body, Image))
             {
                 return false;
             }

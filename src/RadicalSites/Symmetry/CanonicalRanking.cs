@@ -111,6 +111,7 @@ public sealed class CanonicalRanking
         {
             workspace.Isomorphism.Begin(options.SearchLimit);
             Molecule real = StereoPerception.Prepare(workspace, molecule, options.IncludeAtomClasses);
+            graph.AddBodies(real);
             graph.MarkElements();
             return real;
         }

@@ -29,7 +29,7 @@ internal sealed partial class ColorPartition
                 SplitBy(graph, cell);
             }
         }
-        while (graph.ElementCount > 0 && CellCount < Count && SplitByStereo(graph, configuration));
+        while (graph.ElementCount + graph.BodyCount > 0 && CellCount < Count && SplitByStereo(graph, configuration));
     }
 
     private void SplitBy(SymmetryGraph graph, int cell)

@@ -1,3 +1,5 @@
+using System;
+
 namespace RadicalSites.Symmetry;
 
 internal sealed partial class ColorPartition
@@ -55,7 +57,32 @@ internal sealed partial class ColorPartition
             }
         }
 
+        count = MarkBodies(graph, count);
         return count > 0 && SplitTouched(count);
+    }
+
+    private int MarkBodies(SymmetryGraph graph, int count)
+    {
+        Span<int> sequence = stackalloc int[6];
+        for (int body = 0; body < graph.BodyCount; body++)
+        {
+            if (Length[CellOf[graph.BodyFocus[body]]] == 1)
+            {
+                continue;
+            }
+
+            int size = graph.BodySequence(body, CellOf, sequence);
+            uint mark = 17;
+            for (int i = 0; i < size; i++)
+            {
+                mark = (mark ^ (uint)sequence[i]) * 0x9E3779B1u;
+            }
+
+            // Bit 10 keeps the mark positive; the bits below belong to the other marks.
+            count = Mark(graph.BodyFocus[body], (int)(((mark >> 12) << 11) & 0x3FFFF800) | 1024, count);
+        }
+
+        return count;
     }
 
     private int Mark(int atom, int mark, int count)

@@ -14,7 +14,7 @@ internal sealed class LabelledGraph : IEquatable<LabelledGraph>
     internal void Fill(SymmetryGraph graph, ColorPartition order)
     {
         int n = graph.AtomCount;
-        int size = (2 * n) + graph.Offset[n] + graph.ElementCount + 1;
+        int size = (2 * n) + graph.Offset[n] + graph.ElementCount + (7 * graph.BodyCount) + 1;
         if (words.Length < size)
         {
             words = new ulong[Math.Max(size, 2 * words.Length)];
@@ -54,6 +54,30 @@ internal sealed class LabelledGraph : IEquatable<LabelledGraph>
         }
 
         Array.Sort(words, elements, count - elements);
+        if (graph.BodyCount > 0)
+        {
+            AddBodies(graph, order);
+        }
+    }
+
+    private void AddBodies(SymmetryGraph graph, ColorPartition order)
+    {
+        Span<int> sequence = stackalloc int[6];
+        for (int place = 0; place < order.Count; place++)
+        {
+            int body = graph.BodyAt[order.Members[place]] - 1;
+            if (body < 0)
+            {
+                continue;
+            }
+
+            int size = graph.BodySequence(body, order.Position, sequence);
+            words[count++] = ((ulong)place << 8) | (uint)size;
+            for (int i = 0; i < size; i++)
+            {
+                words[count++] = (ulong)(sequence[i] + 1);
+            }
+        }
     }
 
     internal int CompareTo(LabelledGraph other) =>

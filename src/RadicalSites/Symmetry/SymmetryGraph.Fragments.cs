@@ -86,6 +86,7 @@ internal sealed partial class SymmetryGraph
         Reserve(atoms.Length, ends);
         AtomCount = atoms.Length;
         ElementCount = 0;
+        BodyCount = 0;
         Array.Clear(CenterAt, 0, AtomCount);
         Array.Clear(AxisAt, 0, AtomCount);
         int at = 0;
@@ -116,6 +117,8 @@ internal sealed partial class SymmetryGraph
                 AddCopy(whole, axis, place);
             }
         }
+
+        CopyBodies(whole, index, place);
     }
 
     private void AddCopy(SymmetryGraph whole, int e, int[] place)

@@ -52,6 +52,11 @@ internal sealed partial class SymmetryGraph
             Key[Focus[e]] |= mark;
             Key[FocusEnd[e]] |= mark;
         }
+
+        for (int body = 0; body < BodyCount; body++)
+        {
+            Key[BodyFocus[body]] |= 3UL;
+        }
     }
 
     /// <summary>Whether refinement and search handle the geometry of an element.</summary>

@@ -56,6 +56,7 @@ internal sealed partial class SymmetryGraph
         }
 
         ElementCount = 0;
+        BodyCount = 0;
         Array.Clear(CenterAt, 0, n);
         Array.Clear(AxisAt, 0, n);
     }

@@ -1,7 +1,6 @@
 using System;
-using RadicalSites.Molecules;
 
-namespace RadicalSites.Formats.Smiles;
+namespace RadicalSites.Molecules;
 
 /// <summary>Renumbers square-planar, trigonal-bipyramidal and octahedral codes when carriers are listed in another order.</summary>
 /// <remarks>Source: [OPENSMILES] tables of the SP, TB and OH codes.</remarks>
@@ -20,12 +19,7 @@ internal static class CoordinationCodes
     /// <returns>The code, 1-based.</returns>
     internal static int Reorder(StereoElement element, ReadOnlySpan<int> order)
     {
-        int[][] codes = element.Kind switch
-        {
-            StereoKind.SquarePlanar => Square,
-            StereoKind.TrigonalBipyramidal => Bipyramid,
-            _ => Octahedron,
-        };
+        int[][] codes = CodesOf(element.Kind);
         int[] slots = codes[element.Configuration - 1];
         Span<int> wanted = stackalloc int[order.Length];
         for (int i = 0; i < order.Length; i++)
@@ -43,6 +37,16 @@ internal static class CoordinationCodes
 
         return element.Configuration;
     }
+
+    /// <summary>Slot of the ideal body for each carrier of an element, in the order of its carriers.</summary>
+    internal static ReadOnlySpan<int> SlotsOf(StereoElement element) => CodesOf(element.Kind)[element.Configuration - 1];
+
+    private static int[][] CodesOf(StereoKind kind) => kind switch
+    {
+        StereoKind.SquarePlanar => Square,
+        StereoKind.TrigonalBipyramidal => Bipyramid,
+        _ => Octahedron,
+    };
 
     // Two placings are the same body when opposite pairs agree and, for the handed ones, the sense of rotation agrees.
     private static bool SameBody(StereoKind kind, ReadOnlySpan<int> left, ReadOnlySpan<int> right)
