@@ -95,6 +95,29 @@ public sealed class CanonicalRankingTests
     public void Write_spellings_of_one_molecule_have_one_text(string one, string two) =>
         Assert.Equal(CanonicalSmiles.Write(SmilesReader.Parse(one)), CanonicalSmiles.Write(SmilesReader.Parse(two)));
 
+    [Theory]
+    [InlineData("Cl[Pt@SP1](Cl)(N)N", "N[Pt@SP1](Cl)(Cl)N", true)] // cisplatin
+    [InlineData("Cl[Pt@SP1](Cl)(N)N", "Cl[Pt@SP2](Cl)(N)N", false)] // and transplatin
+    [InlineData("S[As@TB1](F)(Cl)(Br)N", "S[As@TB5](F)(N)(Cl)Br", true)] // the two of the OpenSMILES specification
+    [InlineData("S[As@TB1](F)(Cl)(Br)N", "S[As@TB2](F)(Cl)(Br)N", false)]
+    [InlineData("N[Co@OH1](N)(N)(Cl)(Cl)Cl", "Cl[Co@OH1](N)(N)(N)(Cl)Cl", false)] // mer and fac
+    [InlineData("F[Co@OH1](Cl)(Br)(I)(N)O", "F[Co@OH2](Cl)(Br)(I)(N)O", false)]
+    [InlineData("C1CN[Co@OH5]23(N1)(NCCN2)NCCN3", "C1CN[Co@OH8]23(N1)(NCCN2)NCCN3", false)]
+    public void Write_coordination_bodies_are_respected(string one, string two, bool same)
+    {
+        Molecule first = SmilesReader.Parse(one);
+        string text = CanonicalSmiles.Write(first);
+        Random random = new(8);
+
+        Assert.Equal(same, text == CanonicalSmiles.Write(SmilesReader.Parse(two)));
+        for (int i = 0; i < 20; i++)
+        {
+            int[] ranks = [.. Enumerable.Range(0, first.AtomCount)];
+            random.Shuffle(ranks);
+            Assert.Equal(text, CanonicalSmiles.Write(SmilesReader.Parse(SmilesWriter.Write(first, ranks))));
+        }
+    }
+
     [Fact]
     public void Rank_sixty_equal_fragments_and_a_long_chain_take_no_search()
     {
