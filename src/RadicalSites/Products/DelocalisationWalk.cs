@@ -16,15 +16,20 @@ internal static class DelocalisationWalk
     /// <summary>Longest walk, in atoms; a carotenoid stays below it.</summary>
     private const int LongestPath = 64;
 
+    /// <summary>Most canonical forms followed; acyclic and ordinary cyclic polyenes stay far below it.</summary>
+    private const int MostPaths = 512;
+
     /// <summary>Finds all ends.</summary>
     /// <param name="molecule">The substrate.</param>
     /// <param name="carbon">0-based index of the carbon that lost its hydrogen.</param>
-    /// <param name="ends">Receives for each end the path from the carbon to it, both included.</param>
+    /// <param name="ends">
+    /// Receives for each canonical form the path from the carbon to its end, both included; one end may be reached by
+    /// several paths, which leave the pi bonds in different places.
+    /// </param>
     /// <returns>What was met and not followed.</returns>
     internal static DelocalisationBarriers Find(Molecule molecule, int carbon, List<int[]> ends)
     {
         var barriers = DelocalisationBarriers.None;
-        var reached = new HashSet<int> { carbon };
         var queue = new Queue<int[]>();
         queue.Enqueue([carbon]);
         while (queue.TryDequeue(out int[]? path))
@@ -38,7 +43,7 @@ internal static class DelocalisationWalk
                     continue;
                 }
 
-                barriers |= Step(molecule, path, first, reached, queue, ends);
+                barriers |= Step(molecule, path, first, queue, ends);
             }
         }
 
@@ -46,7 +51,7 @@ internal static class DelocalisationWalk
     }
 
     private static DelocalisationBarriers Step(
-        Molecule molecule, int[] path, Neighbor first, HashSet<int> reached, Queue<int[]> queue, List<int[]> ends)
+        Molecule molecule, int[] path, Neighbor first, Queue<int[]> queue, List<int[]> ends)
     {
         var barriers = DelocalisationBarriers.None;
         foreach (Neighbor second in molecule.NeighborsOf(first.Atom))
@@ -69,7 +74,7 @@ internal static class DelocalisationWalk
             {
                 barriers |= DelocalisationBarriers.SmallRing;
             }
-            else if (path.Length + 2 <= LongestPath && reached.Add(second.Atom))
+            else if (path.Length + 2 <= LongestPath && ends.Count < MostPaths)
             {
                 int[] longer = [.. path, first.Atom, second.Atom];
                 ends.Add(longer);

@@ -23,7 +23,7 @@ internal readonly ref struct TranspositionStereo(SymmetryAnalysis symmetry, int[
 
         int hydrogens = molecule.AtomSpan[end].HydrogenCount;
         Others(end, path[^2], out int first, out int second);
-        if (hydrogens > 1)
+        if (hydrogens > 1 || (hydrogens == 0 && second < 0))
         {
             return false;
         }
