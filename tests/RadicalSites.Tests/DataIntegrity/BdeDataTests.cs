@@ -38,9 +38,10 @@ public sealed class BdeDataTests
     [Fact]
     public void Sources_every_publication_is_cited_by_a_table_or_a_comment()
     {
-        string data = string.Concat(Directory.EnumerateFiles(Path.Combine(RepositoryRoot.Path, "src", "RadicalSites"), "*.*", SearchOption.AllDirectories)
+        string data = string.Concat(new[] { "src/RadicalSites", "tests/RadicalSites.Tests" }
+            .SelectMany(static folder => Directory.EnumerateFiles(Path.Combine(RepositoryRoot.Path, folder), "*.*", SearchOption.AllDirectories))
             .Where(static file => (file.EndsWith(".csv", StringComparison.Ordinal) || file.EndsWith(".cs", StringComparison.Ordinal))
-                && !file.Contains("/obj/", StringComparison.Ordinal))
+                && !file.Contains("/obj/", StringComparison.Ordinal) && !file.Contains("/bin/", StringComparison.Ordinal))
             .Select(File.ReadAllText));
 
         Assert.All(Bibliography.All, entry => Assert.Contains(entry.Key, data, StringComparison.Ordinal));
