@@ -1,5 +1,6 @@
 using System;
 using System.Buffers;
+using RadicalSites.Diagnostics;
 using RadicalSites.Formats.Smiles;
 using RadicalSites.Molecules;
 using RadicalSites.Symmetry;
@@ -16,12 +17,27 @@ public static class CanonicalSmiles
     /// <summary>Writes the canonical SMILES.</summary>
     /// <param name="molecule">Any molecule.</param>
     /// <returns>The text; empty for an empty molecule.</returns>
-    public static string Write(Molecule molecule)
+    /// <remarks>
+    /// Marks of stereo that mean nothing are left out. A graph on which the search for the canonical order gives up gets a
+    /// text that is right but may depend on the order of its atoms; the other overload says so.
+    /// </remarks>
+    public static string Write(Molecule molecule) => Write(molecule, CanonicalRankingOptions.Default, out _);
+
+    /// <summary>Writes the canonical SMILES by the given options.</summary>
+    /// <param name="molecule">Any molecule.</param>
+    /// <param name="options">What counts, and how long the search may take.</param>
+    /// <param name="limitReached">The coded remark when the search gave up, otherwise <see langword="null"/>.</param>
+    /// <returns>The text; empty for an empty molecule.</returns>
+    public static string Write(Molecule molecule, CanonicalRankingOptions options, out Diagnostic? limitReached)
     {
         ArgumentNullException.ThrowIfNull(molecule);
+        ArgumentNullException.ThrowIfNull(options);
         int[] ranks = ArrayPool<int>.Shared.Rent(Math.Max(1, molecule.AtomCount));
         Span<int> used = ranks.AsSpan(0, molecule.AtomCount);
-        CanonicalRanking.Fill(molecule, CanonicalRankingOptions.Default, used, out Molecule real);
+        bool complete = CanonicalRanking.Fill(molecule, options, used, out Molecule real);
+        limitReached = complete ? null : CanonicalRanking.LimitReached(options);
+        real = options.IncludeStereo || real.StereoSpan.IsEmpty ? real : real.WithStereo([]);
+        real = options.IncludeAtomClasses ? real : real.WithoutAtomClasses();
         string text = SmilesWriter.Write(real, used);
         ArrayPool<int>.Shared.Return(ranks);
         return text;

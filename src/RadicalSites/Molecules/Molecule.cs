@@ -80,6 +80,10 @@ public sealed class Molecule
     internal Molecule WithStereo(StereoElement[] elements) =>
         new(atoms, bonds, offsets, neighbors, elements, inputIndices, coordinates);
 
+    /// <summary>The same graph with all atom classes 0.</summary>
+    internal Molecule WithoutAtomClasses() =>
+        new(Array.ConvertAll(atoms, static atom => atom.WithAtomClass(0)), bonds, offsets, neighbors, stereo, inputIndices, coordinates);
+
     internal ReadOnlySpan<Atom> AtomSpan => atoms;
 
     internal ReadOnlySpan<Bond> BondSpan => bonds;

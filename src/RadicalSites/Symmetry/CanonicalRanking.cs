@@ -46,8 +46,11 @@ public sealed class CanonicalRanking
             ranks,
             complete
                 ? []
-                : [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], options.SearchLimit, "refinement steps")]);
+                : [LimitReached(options)]);
     }
+
+    internal static Diagnostic LimitReached(CanonicalRankingOptions options) =>
+        Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], options.SearchLimit, "refinement steps");
 
     /// <summary>Writes the ranks to a span; returns whether the order is proven canonical.</summary>
     internal static bool Fill(Molecule molecule, CanonicalRankingOptions options, Span<int> ranks) =>
@@ -70,7 +73,9 @@ public sealed class CanonicalRanking
             ranks[i] = workspace.Canonical.RankOf(i);
         }
 
-        return !workspace.Canonical.IsExhausted;
+        bool complete = !workspace.Canonical.IsExhausted;
+        SymmetryWorkspace.Release(ranks.Length);
+        return complete;
     }
 
     /// <summary>The molecule written down in canonical order, or its mirror image.</summary>
@@ -155,6 +160,7 @@ public sealed class CanonicalRanking
             before += atoms.Length;
         }
 
+        SymmetryWorkspace.Release(ranks.Length);
         return complete;
     }
 }

@@ -39,10 +39,11 @@ public sealed partial class SymmetryAnalysis
             ReadGeometry(workspace, molecule, stated, constitutional, out enantiotopic, out homotopic, hydrogens);
         }
 
+        SymmetryWorkspace.Release(n);
         return new SymmetryAnalysis(
             molecule, constitutional, enantiotopic, homotopic, hydrogens,
             workspace.Isomorphism.IsExhausted
-                ? [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], SearchLimit, "refinement steps")]
+                ? [Diagnostic.Create(ProblemCatalogue.General.LimitReached, [], LimitFor(n), "refinement steps")]
                 : []);
     }
 

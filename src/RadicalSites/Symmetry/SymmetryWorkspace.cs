@@ -5,6 +5,8 @@ namespace RadicalSites.Symmetry;
 /// <summary>Scratch arrays and engines of one thread.</summary>
 internal sealed class SymmetryWorkspace
 {
+    private const int LargestKept = 1 << 16;
+
     [ThreadStatic]
     private static SymmetryWorkspace? own;
 
@@ -26,6 +28,15 @@ internal sealed class SymmetryWorkspace
 
     /// <summary>The workspace of the calling thread; its users do not nest.</summary>
     internal static SymmetryWorkspace Own => own ??= new SymmetryWorkspace();
+
+    /// <summary>Lets the scratch of the calling thread go when it has grown by a very large molecule.</summary>
+    internal static void Release(int atoms)
+    {
+        if (atoms > LargestKept)
+        {
+            own = null;
+        }
+    }
 
     internal int[] PlacesFor(int n)
     {

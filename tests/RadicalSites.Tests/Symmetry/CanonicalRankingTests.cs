@@ -130,6 +130,19 @@ public sealed class CanonicalRankingTests
     }
 
     [Fact]
+    public void Write_options_leave_out_stereo_and_classes()
+    {
+        Molecule molecule = SmilesReader.Parse("C[C@H]([OH:7])CC");
+        CanonicalRankingOptions plain = new() { IncludeStereo = false, IncludeAtomClasses = false };
+
+        Assert.Equal(
+            CanonicalSmiles.Write(SmilesReader.Parse("CCC(C)O")), CanonicalSmiles.Write(molecule, plain, out var none));
+        Assert.Null(none);
+        CanonicalSmiles.Write(LatticeGraph(true), plain with { SearchLimit = 1 }, out var limit);
+        Assert.Equal("limit-reached", limit?.Code);
+    }
+
+    [Fact]
     public void Rank_is_a_permutation_and_the_limit_is_reported()
     {
         CanonicalRanking full = CanonicalRanking.Rank(LatticeGraph(true));
