@@ -6,8 +6,8 @@ namespace RadicalSites.Symmetry;
 
 public static partial class StereoPerception
 {
-    /// <summary>Stereoisomers looked at to decide on places that depend on each other.</summary>
-    private const int MostTried = 512;
+    /// <summary>Combinations of configurations looked at to decide on places that depend on each other.</summary>
+    private const int MostTried = 2048;
 
     /// <summary>Finds the places whose configuration matters, stated or not.</summary>
     /// <param name="molecule">Any molecule.</param>
@@ -44,7 +44,7 @@ public static partial class StereoPerception
 
         if (open.Count > 0)
         {
-            AddProven(molecule, open, units);
+            AddProven(real, choices, open, units);
         }
 
         return [.. units.Values];
@@ -155,30 +155,41 @@ public static partial class StereoPerception
         return e >= 0 && graph.ResolvedSign(e, workspace.Constitution.CellOf, graph.Configuration) == 0;
     }
 
-    /// <summary>Adds the dependent places that keep their mark in at least one stereoisomer.</summary>
+    /// <summary>Adds the dependent places that keep their mark in at least one combination of configurations.</summary>
+    /// <remarks>Ends as soon as every place is proven, mostly with the first combinations.</remarks>
     private static void AddProven(
-        Molecule molecule, List<StereoElement> open, SortedDictionary<(int, int), StereoUnit> units)
+        Molecule real, List<StereoElement[]> choices, List<StereoElement> open,
+        SortedDictionary<(int, int), StereoUnit> units)
     {
-        StereoisomerSet isomers = StereoisomerEnumeration.Enumerate(molecule, true, MostTried);
-        foreach (Stereoisomer isomer in isomers.Stereoisomers)
+        int[] digits = new int[choices.Count];
+        int missing = open.Count;
+        int trials = 0;
+        do
         {
-            foreach (StereoElement element in isomer.Molecule.StereoSpan)
+            foreach (StereoElement element in WithoutPhantoms(
+                StereoisomerEnumeration.Assign(real, choices, digits)).StereoSpan)
             {
-                if (units.ContainsKey((element.Focus, element.FocusEnd)))
+                (int, int) place = (element.Focus, element.FocusEnd);
+                if (!units.ContainsKey(place) && IsAmong(open, place))
                 {
-                    continue;
-                }
-
-                foreach (StereoElement candidate in open)
-                {
-                    if (candidate.Focus == element.Focus && candidate.FocusEnd == element.FocusEnd)
-                    {
-                        units.Add(
-                            (element.Focus, element.FocusEnd),
-                            new StereoUnit(element.Kind, element.Focus, element.FocusEnd, false, true));
-                    }
+                    units.Add(place, new StereoUnit(element.Kind, element.Focus, element.FocusEnd, false, true));
+                    missing--;
                 }
             }
         }
+        while (missing > 0 && ++trials < MostTried && StereoisomerEnumeration.Advance(digits, choices));
+    }
+
+    private static bool IsAmong(List<StereoElement> open, (int, int) place)
+    {
+        foreach (StereoElement candidate in open)
+        {
+            if ((candidate.Focus, candidate.FocusEnd) == place)
+            {
+                return true;
+            }
+        }
+
+        return false;
     }
 }

@@ -96,7 +96,7 @@ public static class StereoisomerEnumeration
     }
 
     /// <summary>One group of places tied together by a cage has two ways: as it stands, or all turned over.</summary>
-    private static Molecule Assign(Molecule start, List<StereoElement[]> choices, int[] digits)
+    internal static Molecule Assign(Molecule start, List<StereoElement[]> choices, int[] digits)
     {
         List<StereoElement> elements = [.. start.StereoSpan];
         for (int i = 0; i < digits.Length; i++)
@@ -111,7 +111,8 @@ public static class StereoisomerEnumeration
         return elements.Count == start.StereoSpan.Length ? start : start.WithStereo([.. elements]);
     }
 
-    private static bool Advance(int[] digits, List<StereoElement[]> choices)
+    /// <summary>The next combination; false after the last.</summary>
+    internal static bool Advance(int[] digits, List<StereoElement[]> choices)
     {
         for (int i = 0; i < choices.Count; i++)
         {
