@@ -80,7 +80,7 @@ public sealed class IsomerEnumeration
             ? new StereoPermutations(substrate.Molecule)
             : null;
         SubstitutionSymmetry? symmetry = SubstitutionSymmetry.Find(
-            substrate.Molecule, substrate.Carbons, stereo is null ? null : stereo.Keeps, cancellation);
+            substrate.Molecule, substrate.Carbons, stereo, cancellation);
         bool whole = stereo is null;
         if (symmetry is null)
         {

@@ -20,6 +20,9 @@ internal sealed class StereoPermutations
         }
     }
 
+    /// <summary>Number of stated elements.</summary>
+    internal int ElementCount => molecule.StereoElements.Count;
+
     /// <summary>Whether an automorphism maps every element onto one of the same configuration.</summary>
     internal bool Keeps(int[] image)
     {
@@ -35,10 +38,39 @@ internal sealed class StereoPermutations
         return true;
     }
 
+    /// <summary>The elements that a map can turn over or move, as indices into the elements of the molecule.</summary>
+    internal IEnumerable<int> Touched(int[] image)
+    {
+        for (int i = 0; i < molecule.StereoElements.Count; i++)
+        {
+            StereoElement element = molecule.StereoElements[i];
+            bool touched = image[element.Focus] != element.Focus || image[element.FocusEnd] != element.FocusEnd;
+            foreach (Neighbor neighbor in molecule.NeighborsOf(element.Focus))
+            {
+                touched |= image[neighbor.Atom] != neighbor.Atom;
+            }
+
+            foreach (Neighbor neighbor in molecule.NeighborsOf(element.FocusEnd))
+            {
+                touched |= image[neighbor.Atom] != neighbor.Atom;
+            }
+
+            foreach (int carrier in element.Carriers)
+            {
+                touched |= carrier >= 0 && image[carrier] != carrier;
+            }
+
+            if (touched)
+            {
+                yield return i;
+            }
+        }
+    }
+
     private bool IsSame(StereoElement element, StereoElement there, int[] image) => element.Kind switch
     {
         StereoKind.Tetrahedral => element.Configuration == there.Configuration == IsEven(element, there, image),
-        StereoKind.Allene => element.Configuration == there.Configuration == IsEven(element, there, image),
+        StereoKind.Allene => element.Configuration == there.Configuration == KeepsAxis(element, there, image),
         StereoKind.CisTrans => SameSide(element, there, image),
         _ => IsUnmoved(element, image),
     };
@@ -61,6 +93,20 @@ internal sealed class StereoPermutations
             {
                 even ^= places[i] > places[j];
             }
+        }
+
+        return even;
+    }
+
+    // The two ends of an allene may change places; what counts is whether an odd number of ends is turned.
+    private static bool KeepsAxis(StereoElement element, StereoElement there, int[] image)
+    {
+        bool even = true;
+        for (int end = 0; end < 4; end += 2)
+        {
+            int place = element.CarrierSpan[end] >= 0 ? end : end + 1;
+            int carrier = element.CarrierSpan[place];
+            even ^= carrier >= 0 && ((there.CarrierSpan.IndexOf(image[carrier]) ^ place) & 1) != 0;
         }
 
         return even;

@@ -42,11 +42,11 @@ internal sealed class SubstitutionSymmetry
     /// <summary>Finds the symmetry.</summary>
     /// <param name="molecule">The substrate.</param>
     /// <param name="carbons">Substitutable carbons, in the order of their rank.</param>
-    /// <param name="accept">Whether an automorphism counts; <see langword="null"/> = all.</param>
+    /// <param name="stereo">Stereo that an automorphism must keep to count; <see langword="null"/> = all count.</param>
     /// <param name="cancellation">Ends the search.</param>
     /// <returns>The symmetry, or <see langword="null"/> when a factor is too large to list.</returns>
     internal static SubstitutionSymmetry? Find(
-        Molecule molecule, int[] carbons, Func<int[], bool>? accept, CancellationToken cancellation)
+        Molecule molecule, int[] carbons, StereoPermutations? stereo, CancellationToken cancellation)
     {
         int atomCount = molecule.AtomCount;
         var rankOfAtom = new int[atomCount];
@@ -71,10 +71,10 @@ internal sealed class SubstitutionSymmetry
 
         AutomorphismGroup group = AutomorphismGroup.Find(molecule, baseOrder, cancellation);
         var factors = new List<SubstitutionFactor>();
-        foreach ((int[] points, List<int[][]> levels) in Split(group.Levels, rankOfAtom))
+        foreach ((int[] points, List<int[][]> levels) in Split(group.Levels, rankOfAtom, stereo))
         {
             SubstitutionFactor? factor = SubstitutionFactor.List(
-                points, levels, rankOfAtom, carbons, accept, FactorLimit, cancellation);
+                points, levels, rankOfAtom, carbons, stereo is null ? null : stereo.Keeps, FactorLimit, cancellation);
             if (factor is null)
             {
                 return null;
@@ -157,12 +157,14 @@ internal sealed class SubstitutionSymmetry
         return ways;
     }
 
-    // Levels that move a common atom act together; the others are independent factors.
-    private static IEnumerable<(int[] Points, List<int[][]> Levels)> Split(List<int[][]> levels, int[] rankOfAtom)
+    // Levels that move a common atom, or act on a common stereo element, belong together; the others are independent
+    // factors. Nodes beyond the atoms stand for the elements.
+    private static IEnumerable<(int[] Points, List<int[][]> Levels)> Split(
+        List<int[][]> levels, int[] rankOfAtom, StereoPermutations? stereo)
     {
         int atomCount = rankOfAtom.Length;
-        var parent = new int[atomCount];
-        for (int i = 0; i < atomCount; i++)
+        var parent = new int[atomCount + (stereo?.ElementCount ?? 0)];
+        for (int i = 0; i < parent.Length; i++)
         {
             parent[i] = i;
         }
@@ -187,10 +189,15 @@ internal sealed class SubstitutionSymmetry
 
                     parent[Root(atom)] = Root(firstMoved[level]);
                 }
+
+                foreach (int element in stereo?.Touched(map) ?? [])
+                {
+                    parent[Root(atomCount + element)] = Root(firstMoved[level]);
+                }
             }
         }
 
-        for (int root = 0; root < atomCount; root++)
+        for (int root = 0; root < parent.Length; root++)
         {
             if (Root(root) != root)
             {

@@ -4,8 +4,10 @@ using System.Linq;
 using System.Numerics;
 using RadicalSites.Formats.Smiles;
 using RadicalSites.Molecules;
+using RadicalSites.Perception;
 using RadicalSites.Products;
 using RadicalSites.Sites;
+using RadicalSites.Symmetry;
 
 namespace RadicalSites.Tests.Products;
 
@@ -75,6 +77,49 @@ public class IsomerEnumerationTests
         Assert.Equal(
             ways.Select(static pair => $"{pair.Key} {pair.Value}"),
             listed.Select(static one => $"{one.CanonicalSmiles} {one.Degeneracy}").Order(StringComparer.Ordinal));
+    }
+
+    [Theory]
+    [InlineData("C[C@H](Cl)[C@H](Cl)C")]
+    [InlineData("C[C@H](O)C(O)[C@@H](O)C")]
+    [InlineData("C[C@H]1CC[C@@H](C)CC1")]
+    [InlineData("C[C@H]1C[C@@H](C)C1")]
+    [InlineData("C[C@H]1C[C@H](C)C1")]
+    [InlineData("C/C=C/C=C\\C")]
+    [InlineData("CC=[C@]=CC")]
+    [InlineData("O[C@H]1[C@H](O)[C@@H](O)[C@H](O)[C@H](O)[C@@H]1O")]
+    [InlineData("C1C[C@@H]2CC[C@H]1C2")]
+    [InlineData("C[C@H](O)CC[C@H](O)C.C[C@H](O)CC[C@@H](O)C")]
+    [InlineData("CC(C)[C@H](F)C(C)(C)C")]
+    public void Enumerate_with_stereo_equals_brute_force_without_doubles(string smiles)
+    {
+        Molecule molecule = StereoPerception.WithoutPhantoms(SmilesReader.Parse(smiles));
+        int[] carbons = [.. Enumerable.Range(0, molecule.AtomCount).Where(atom => SiteFinder.IsSiteCarbon(molecule, atom))];
+        RingAnalysis rings = RingAnalysis.Perceive(molecule);
+        int[] rigid = [.. carbons.Where(atom => molecule.Atoms[atom].IsInRing && RingStrain.HoldsShape(rings, atom))];
+        for (int times = 1; times <= 2; times++)
+        {
+            var expected = new SortedSet<string>(StringComparer.Ordinal);
+            foreach (int first in carbons)
+            {
+                foreach (int second in times == 1 ? [-1] : carbons)
+                {
+                    if (first != second || molecule.Atoms[first].HydrogenCount > 1)
+                    {
+                        int[] picked = second < 0 ? [first] : [first, second];
+                        expected.Add(ProductIdentity.SmilesOf(
+                            HydrogenReplacement.Replace(molecule, picked, 17, molecule.StereoSpan, rigid)));
+                    }
+                }
+            }
+
+            string[] listed =
+            [
+                .. IsomerEnumeration.Of(molecule, new IsomerOptions { MinimumTimes = times, MaximumTimes = times }).Enumerate()
+                    .Select(static one => one.CanonicalSmiles).Order(StringComparer.Ordinal),
+            ];
+            Assert.Equal(expected, listed);
+        }
     }
 
     [Theory]
