@@ -32,6 +32,8 @@ public static partial class ProblemCatalogue
             {
                 General.Entries,
                 Smiles.Entries,
+                Molfile.Entries,
+                MolfileRemarks.Entries,
                 Chemistry.Entries,
                 Thermochemistry.Entries,
                 Selectivity.Entries,
