@@ -163,22 +163,19 @@ internal sealed partial class MolfileParse
         return shape && !HasLikeLigands(atom, -1);
     }
 
-    // A neutral nitrogen holds its configuration in a three-membered ring or where all its bonds lie on rings.
+    // A neutral nitrogen holds its configuration where all its bonds lie on rings; the invertomer of a computed geometry
+    // says nothing elsewhere.
     private bool IsHeldNitrogen(int atom)
     {
-        bool all = true;
         foreach (Neighbor neighbor in NeighborsOf(atom))
         {
-            int size = SmallestRing(neighbor.Bond, 8);
-            if (size == 3)
+            if (SmallestRing(neighbor.Bond, 8) == 0)
             {
-                return true;
+                return false;
             }
-
-            all &= size > 0;
         }
 
-        return all;
+        return true;
     }
 
     // Two hydrogens, or two like end groups: told apart by neither geometry nor wedge.
