@@ -25,8 +25,12 @@ internal static class FrameReadings
         bool[]? open = null;
         for (int e = stated; e < graph.ElementCount; e++)
         {
+            // Resolved by colours, the frame is read the same way for every numbering; an axis then asks for nothing more.
             int focus = graph.Focus[e];
-            if (flexible[e] < 0 && cells.Length[cells.CellOf[focus]] > 1)
+            int sign = flexible[e] < 0 ? graph.ResolvedSign(e, cells.CellOf, graph.Configuration) : 0;
+            graph.Configuration[e] = sign < 0 ? (sbyte)-graph.Configuration[e] : graph.Configuration[e];
+            if (flexible[e] < 0 && cells.Length[cells.CellOf[focus]] > 1
+                && (sign == 0 || graph.Kind[e] != SymmetryGraph.Axis))
             {
                 (open ??= new bool[graph.FragmentCount])[graph.FragmentIndexOf(focus)] = true;
             }
@@ -55,7 +59,8 @@ internal static class FrameReadings
                 continue;
             }
 
-            List<sbyte[]> own = new FragmentReadings(workspace, fragment, stated).Solve(MostReadings);
+            List<sbyte[]> own = PairReadings(workspace, fragment, stated)
+                ?? new FragmentReadings(workspace, fragment, stated).Solve(MostReadings);
             List<sbyte[]> combined = [];
             int count = Math.Max(readings.Count, own.Count);
             for (int r = 0; r < count; r++)
@@ -77,6 +82,65 @@ internal static class FrameReadings
         }
 
         return readings;
+    }
+
+    /// <summary>
+    /// The common case without a search: every rigid frame of the fragment is resolved by colours and none is stated. One
+    /// that stays in place makes all operations keep the configuration; otherwise, when one exchange swaps all pairs, the
+    /// two of a pair are alike or mirror images.
+    /// </summary>
+    private static List<sbyte[]>? PairReadings(SymmetryWorkspace workspace, int fragment, int stated)
+    {
+        SymmetryGraph graph = workspace.Graph;
+        ColorPartition cells = workspace.Constitution;
+        int count = graph.ElementCount;
+        bool hasFixed = false;
+        int first = -1;
+        for (int e = 0; e < count; e++)
+        {
+            if (workspace.Flexible.State[e] > 0 || graph.FragmentIndexOf(graph.Focus[e]) != fragment)
+            {
+                continue;
+            }
+
+            int length = cells.Length[cells.CellOf[graph.Focus[e]]];
+            if (e < stated || length > 2 || graph.ResolvedSign(e, cells.CellOf, graph.Configuration) == 0)
+            {
+                return null;
+            }
+
+            if (graph.Kind[e] != SymmetryGraph.Axis)
+            {
+                hasFixed |= length == 1;
+                first = first < 0 && length == 2 ? e : first;
+            }
+        }
+
+        sbyte[] alike = graph.Configuration.AsSpan(0, count).ToArray();
+        if (hasFixed)
+        {
+            return [alike];
+        }
+
+        int cell = cells.CellOf[graph.Focus[first]];
+        graph.ElementCount = 0;
+        bool swaps = workspace.Probe.TryMap(graph, cells, cells.Members[cell], cells.Members[cell + 1]);
+        graph.ElementCount = count;
+        sbyte[] mirrored = [.. alike];
+        for (int e = 0; e < count && swaps; e++)
+        {
+            int focus = graph.Focus[e];
+            if (workspace.Flexible.State[e] > 0 || graph.Kind[e] == SymmetryGraph.Axis
+                || graph.FragmentIndexOf(focus) != fragment)
+            {
+                continue;
+            }
+
+            swaps = workspace.Probe.ImageOf(focus) != focus;
+            mirrored[e] = focus == cells.Members[cells.CellOf[focus]] ? mirrored[e] : (sbyte)-mirrored[e];
+        }
+
+        return swaps ? [alike, mirrored] : null;
     }
 
     /// <summary>The equivalent atom that lies in the first fragment.</summary>
