@@ -60,7 +60,7 @@ public static partial class ProblemCatalogue
         /// <summary>Bound for a site without a rate.</summary>
         public static readonly ProblemDescriptor ShareBound = new(
             "share-bound", Severity.Info, "Bound for a site without data",
-            "Site {0} has no bond enthalpy and no share; if its hydrogens reacted as fast as the fastest rated ones it would take {1:F0} % and the other shares would shrink in proportion.",
+            "Site {0} has no bond enthalpy and no share; with a bond as strong as usual in its class it would take {1:F1} % and the other shares would shrink in proportion.",
             "The table has no value for its bond.",
             "Load a table with this bond, or read the shares as those of the rated sites alone.");
 

@@ -40,6 +40,9 @@ public sealed record Carrier
     /// <summary>Decrease of ln k for each heavy atom beyond the first that stands two bonds from the attacked carbon.</summary>
     public required double Steric { get; init; }
 
+    /// <summary>Factor on the inductive term of a neighbouring group where the attacked carbon is primary.</summary>
+    public required double PrimarySensitivity { get; init; }
+
     /// <summary>Highest rate per hydrogen relative to primary that collision or diffusion allows; 0 without a bound.</summary>
     public required double Ceiling { get; init; }
 

@@ -69,7 +69,7 @@ internal static class ParameterIndex
             list.Add(new($"{carrier.Id}/attenuation-liquid", carrier.AttenuationInLiquid, 0.1, carrier.Id));
             list.Add(new($"{carrier.Id}/hammett-rho", carrier.HammettRho, 0.15 * Math.Abs(carrier.HammettRho), carrier.Id));
             list.Add(new($"{carrier.Id}/steric", carrier.Steric, 0.3 * carrier.Steric, carrier.Id));
-            list.Add(new($"{carrier.Id}/slope", carrier.SlopeWeak, 0.15 * carrier.SlopeWeak, carrier.Id));
+            list.Add(new($"{carrier.Id}/slope", carrier.SlopeWeak, 0.08 * carrier.SlopeWeak, carrier.Id));
         }
 
         foreach (AlphaGroupKind kind in Enum.GetValues<AlphaGroupKind>())

@@ -73,6 +73,7 @@ internal sealed partial class RateModel
         carbons[0] = site.Carbons[0];
         distances[0] = 0;
         int filled = 1;
+        double sensitivity = site.Degree <= SiteDegree.Primary ? carrier.PrimarySensitivity : 1;
         double induction = 0;
         double beta = 0;
         for (int head = 0; head < filled; head++)
@@ -97,7 +98,8 @@ internal sealed partial class RateModel
                 }
                 else if (distance > 0)
                 {
-                    induction += attenuation[distance] * GroupSigma(molecule, carbon, other, out double bridging);
+                    induction += (distance == 1 ? sensitivity : attenuation[distance])
+                        * GroupSigma(molecule, carbon, other, out double bridging);
                     beta += distance == 1 ? bridging : 0;
                 }
             }

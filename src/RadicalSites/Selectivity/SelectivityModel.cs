@@ -76,8 +76,28 @@ public sealed class SelectivityModel
             weights[i] /= sum;
         }
 
+        double[] bounds = propagates && sum > 0 ? Bounds(analysis, assignments, largest, sum) : [];
         double deuteriumShare = sum > 0 && deuterium > 0 ? deuterium / (deuterium + sum) : 0;
-        return new SelectivityResult(Conditions, analysis, assignments, steps, lnRates, weights, propagates, deuteriumShare);
+        return new SelectivityResult(Conditions, analysis, assignments, steps, lnRates, weights, propagates, deuteriumShare, bounds);
+    }
+
+    // Share that a site without a bond enthalpy would take if its bond were that of its class; NaN for the others.
+    private double[] Bounds(SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments, double largest, double sum)
+    {
+        var bounds = new double[assignments.Count];
+        for (int i = 0; i < bounds.Length; i++)
+        {
+            bounds[i] = double.NaN;
+            if (assignments[i].KilojoulesPerMole is null)
+            {
+                Site site = analysis.Sites[i];
+                double value = rates.Rate(analysis.Molecule, site, RateModel.AnchorOf(site), 0).Value;
+                double weight = site.HydrogenCount * Math.Exp(value - largest);
+                bounds[i] = weight / (weight + sum);
+            }
+        }
+
+        return bounds;
     }
 
     /// <summary>Shares alone, for fitting: no steps, intervals or remarks.</summary>

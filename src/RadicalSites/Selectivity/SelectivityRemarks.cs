@@ -16,7 +16,7 @@ internal static class SelectivityRemarks
 
     internal static IReadOnlyList<Diagnostic> Of(
         ReactionConditions conditions, SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments,
-        SelectivityResult result)
+        SelectivityResult result, double[] bounds)
     {
         IReadOnlyList<SiteSelectivity> sites = result.Sites;
         var remarks = new List<Diagnostic>();
@@ -47,7 +47,7 @@ internal static class SelectivityRemarks
         }
 
         Chain(remarks, sites);
-        Unrated(remarks, analysis, sites);
+        Unrated(remarks, analysis, bounds);
         if (result.DeuteriumShare > 0)
         {
             remarks.Add(Diagnostic.Create(
@@ -93,26 +93,14 @@ internal static class SelectivityRemarks
         }
     }
 
-    // A site without a rate cannot react faster than the fastest rated hydrogen by more than nobody knows; as fast as it is
-    // the bound named to the reader.
-    private static void Unrated(List<Diagnostic> remarks, SiteAnalysis analysis, IReadOnlyList<SiteSelectivity> sites)
+    private static void Unrated(List<Diagnostic> remarks, SiteAnalysis analysis, double[] bounds)
     {
-        double fastest = 0;
-        double sum = 0;
-        for (int i = 0; i < sites.Count; i++)
+        for (int i = 0; i < bounds.Length; i++)
         {
-            double rate = sites[i].RelativeRatePerHydrogen ?? 0;
-            fastest = Math.Max(fastest, rate);
-            sum += rate * analysis.Sites[i].HydrogenCount;
-        }
-
-        for (int i = 0; i < sites.Count && fastest > 0; i++)
-        {
-            if (sites[i].Share is null)
+            if (!double.IsNaN(bounds[i]))
             {
-                double weight = fastest * analysis.Sites[i].HydrogenCount;
                 remarks.Add(Diagnostic.Create(
-                    Entry.ShareBound, analysis.Sites[i].Carbons, sites[i].SiteNumber, 100 * weight / (sum + weight)));
+                    Entry.ShareBound, analysis.Sites[i].Carbons, analysis.Sites[i].Number, 100 * bounds[i]));
             }
         }
     }

@@ -14,7 +14,7 @@ public sealed class SelectivityResult
 
     internal SelectivityResult(
         ReactionConditions conditions, SiteAnalysis analysis, IReadOnlyList<BdeAssignment> assignments,
-        StepEnthalpies[] steps, LnRate[] lnRates, double[] shares, bool propagates, double deuteriumShare)
+        StepEnthalpies[] steps, LnRate[] lnRates, double[] shares, bool propagates, double deuteriumShare, double[] bounds)
     {
         intervals = new ShareIntervals(lnRates, shares, assignments);
         Propagates = propagates;
@@ -34,7 +34,7 @@ public sealed class SelectivityResult
         }
 
         Sites = sites;
-        Diagnostics = SelectivityRemarks.Of(conditions, analysis, assignments, this);
+        Diagnostics = SelectivityRemarks.Of(conditions, analysis, assignments, this, bounds);
     }
 
     /// <summary>One entry for each site, in the order of the sites.</summary>
