@@ -67,6 +67,16 @@ public static class SelectivityCalibrator
         };
     }
 
+    /// <summary>Head of the file that holds a fit: what it was fitted to and how well.</summary>
+    internal static string RecordOf(CalibrationReport report) => FormattableString.Invariant(
+        $"""
+        quantity: shifts of parameters of the selectivity model, added to the values of the tables; sigma: standard deviation after the fit
+        fitted to {report.Experiments} entries of the fit set of the table distributions by regularised least squares (SelectivityCalibrator)
+        mean absolute error over the fitted products: {report.ErrorBefore:0.00} before, {report.ErrorAfter:0.00} after [percentage points]
+        more than four standard deviations off, weighted down: {(report.Outliers.Count == 0 ? "none" : string.Join(' ', report.Outliers))}
+        renewed by the test Fit_of_the_shipped_distributions_gives_the_shipped_table with RADICALSITES_RENEW_FIT=1
+        """);
+
     private static CalibratedParameter[] Moves(
         int[] active, double[] start, double[] spread, double[] shifts, double[] sigmas) =>
         [.. active
