@@ -5,6 +5,7 @@ using System.IO;
 using System.Linq;
 using RadicalSites.Cli.Commands;
 using RadicalSites.Diagnostics;
+using RadicalSites.Formats.Smiles;
 using RadicalSites.Thermochemistry;
 
 namespace RadicalSites.Cli;
@@ -12,6 +13,8 @@ namespace RadicalSites.Cli;
 /// <summary>Runs one invocation of the tool.</summary>
 internal static class Tool
 {
+    private static readonly ParserConfiguration Parsing = new() { EnablePosixBundling = false, ResponseFileTokenReplacer = null };
+
     /// <summary>Parses the arguments and runs the command.</summary>
     /// <returns>The exit code.</returns>
     internal static int Run(string[] arguments, ToolHost host)
@@ -26,24 +29,19 @@ internal static class Tool
 
             if (arguments.Length == 0)
             {
-                host.Error.Write("No command given.\n");
-                using var help = new StringWriter(System.Globalization.CultureInfo.InvariantCulture) { NewLine = "\n" };
-                root.Parse(["--help"]).Invoke(new InvocationConfiguration { Output = help, Error = help });
-                host.Error.Write(HelpText.Finish(help.ToString(), root.Name));
+                host.Error.Write("radicalsites: no command given.\n\n");
+                HelpText.Write(host.Error, root);
                 return ExitCode.WrongUsage;
             }
 
-            ParseResult parsed = root.Parse(arguments);
+            CheckCommand(arguments[0], root);
+            ParseResult parsed = root.Parse(arguments, Parsing);
             if (parsed.Errors.Count > 0)
             {
-                string[] messages = [.. parsed.Errors.Select(static error => error.Message).Distinct()];
-                foreach (string message in messages.Where(message => messages.Length == 1 || !message.StartsWith("Required command", StringComparison.Ordinal)))
-                {
-                    host.Error.Write($"radicalsites: {message}\n");
-                }
-
-                host.Error.Write("Try 'radicalsites --help' or 'radicalsites COMMAND --help'.\n");
-                return ExitCode.WrongUsage;
+                string path = parsed.CommandResult.Command is RootCommand ? "" : parsed.CommandResult.Command.Name + " ";
+                throw new ToolException(
+                    ExitCode.WrongUsage,
+                    string.Join("\nradicalsites: ", parsed.Errors.Select(static error => error.Message).Distinct()) + $"\n  See 'radicalsites {path}--help'.");
             }
 
             using var text = new StringWriter(System.Globalization.CultureInfo.InvariantCulture) { NewLine = "\n" };
@@ -54,8 +52,13 @@ internal static class Tool
                 EnableDefaultExceptionHandler = false,
                 ProcessTerminationTimeout = null,
             });
-            host.Output.Write(System.Text.Encoding.UTF8.GetBytes(
-                parsed.Action is HelpAction ? HelpText.Finish(text.ToString(), parsed.CommandResult.Command.Name) : text.ToString()));
+            if (parsed.Action is HelpAction)
+            {
+                text.GetStringBuilder().Clear();
+                HelpText.Write(text, parsed.CommandResult.Command);
+            }
+
+            host.Output.Write(System.Text.Encoding.UTF8.GetBytes(text.ToString()));
             host.Output.Flush();
             return code;
         }
@@ -91,6 +94,41 @@ internal static class Tool
             host.Error.Write($"radicalsites: internal error ({error.GetType().Name}: {error.Message}). Please report the input that caused it.\n");
             return ExitCode.Internal;
         }
+    }
+
+    private static void CheckCommand(string first, RootCommand root)
+    {
+        if (first.StartsWith('-') || root.Subcommands.Any(command => command.Name == first))
+        {
+            return;
+        }
+
+        string? near = root.Subcommands.Select(static command => command.Name)
+            .Where(name => Distance(name, first) <= 2).MinBy(name => Distance(name, first));
+        throw new ToolException(
+            ExitCode.WrongUsage,
+            near is not null ? $"there is no command '{first}'; did you mean {near}?"
+            : SmilesReader.TryParse(first, out _, out _) ? $"'{first}' is no command; for a molecule write: radicalsites predict '{first}'"
+            : $"there is no command '{first}'; 'radicalsites --help' lists them.");
+    }
+
+    // Edits between two words: letters put in, left out or replaced.
+    private static int Distance(string left, string right)
+    {
+        var row = Enumerable.Range(0, right.Length + 1).ToArray();
+        for (int i = 1; i <= left.Length; i++)
+        {
+            int diagonal = row[0];
+            row[0] = i;
+            for (int j = 1; j <= right.Length; j++)
+            {
+                int above = row[j];
+                row[j] = Math.Min(Math.Min(row[j], row[j - 1]) + 1, diagonal + (left[i - 1] == right[j - 1] ? 0 : 1));
+                diagonal = above;
+            }
+        }
+
+        return row[^1];
     }
 
     private static int WriteVersion(ToolHost host)

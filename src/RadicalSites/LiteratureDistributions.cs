@@ -8,16 +8,20 @@ namespace RadicalSites;
 /// <remarks>Stateless and safe for use by many threads.</remarks>
 public static class LiteratureDistributions
 {
-    private static readonly string[] Columns =
-    [
-        "id", "substrate", "reagent", "celsius", "solvent", "product", "percent", "kind", "split", "source", "locator",
-        "confidence", "note",
-    ];
+    private static readonly string[] Columns = ["id", "substrate", "reagent", "celsius", "product", "percent"];
+
+    private static readonly string[] Optional =
+        ["solvent", "kind", "split", "source", "locator", "confidence", "note"];
 
     /// <summary>The shipped distributions from the literature, in table order.</summary>
     public static IReadOnlyList<MeasuredDistribution> Default => Holder.Entries;
 
     /// <summary>Reads a table: CSV, one row for each product, rows of one id together.</summary>
+    /// <remarks>
+    /// Columns: id, substrate, reagent, celsius, product, percent; and where wanted solvent, kind (measured, derived), split
+    /// (fit, test), source, locator, confidence, note. Without them a row is measured, for fitting, and its source is the
+    /// table itself.
+    /// </remarks>
     /// <param name="name">Name for messages.</param>
     /// <param name="text">The text.</param>
     /// <returns>The entries in table order; may be empty.</returns>
@@ -30,7 +34,7 @@ public static class LiteratureDistributions
         var products = new List<MeasuredProduct>();
         var seen = new HashSet<string>(StringComparer.Ordinal);
         CsvRow? first = null;
-        foreach (CsvRow row in CsvTable.Read(name, text, Columns, []).Rows)
+        foreach (CsvRow row in CsvTable.Read(name, text, Columns, Optional).Rows)
         {
             string id = row.Required("id");
             if (first is null || first.Text("id") != id)
@@ -72,9 +76,9 @@ public static class LiteratureDistributions
             Products = products.ToArray(),
             IsMeasured = OneOf(row, "kind", "measured", "derived"),
             IsForFitting = OneOf(row, "split", "fit", "test"),
-            Source = row.Required("source"),
-            Locator = row.Required("locator"),
-            Confidence = row.Required("confidence"),
+            Source = row.Text("source") is { Length: > 0 } source ? source : row.Table,
+            Locator = row.Text("locator") is { Length: > 0 } locator ? locator : $"line {row.Line}",
+            Confidence = row.Text("confidence") is { Length: > 0 } confidence ? confidence : "high",
             Note = row.Text("note"),
         });
         products.Clear();
@@ -82,8 +86,8 @@ public static class LiteratureDistributions
 
     private static bool OneOf(CsvRow row, string column, string yes, string no)
     {
-        string value = row.Required(column);
-        return value == yes || (value == no ? false : throw row.Error(column, $"'{value}' is neither {yes} nor {no}."));
+        string value = row.Text(column);
+        return value.Length == 0 || value == yes || (value == no ? false : throw row.Error(column, $"'{value}' is neither {yes} nor {no}."));
     }
 
     private static class Holder

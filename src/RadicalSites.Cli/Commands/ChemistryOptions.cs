@@ -21,6 +21,7 @@ internal sealed class ChemistryOptions
     private readonly Option<string?> temperature = new("--temperature") { Description = "80C or 353K; a bare number is in C. Default: the usual one of the reagent." };
     private readonly Option<string?> solvent = new("--solvent") { Description = "Id of the solvent, see 'data solvents'; default: gas or inert solvent." };
     private readonly Option<string?> table = new("--bde-table") { Description = "Your own table of bond enthalpies, laid over the shipped one." };
+    private readonly Option<string?> calibration = new("--calibration") { Description = "Parameters fitted to your own ratios, as written by 'calibrate'." };
     private readonly Option<bool> merge = new("--merge-diastereotopic") { Description = "One site for carbons that only existing stereo tells apart." };
     private readonly Option<string> stereo = new("--stereo")
     {
@@ -33,6 +34,7 @@ internal sealed class ChemistryOptions
     internal void AddReaction(Command command)
     {
         command.Options.Add(reagent);
+        command.Options.Add(calibration);
         command.Options.Add(temperature);
         command.Options.Add(solvent);
     }
@@ -41,6 +43,7 @@ internal sealed class ChemistryOptions
     {
         command.Options.Add(temperature);
         command.Options.Add(solvent);
+        command.Options.Add(calibration);
     }
 
     internal void AddTable(Command command) => command.Options.Add(table);
@@ -96,6 +99,7 @@ internal sealed class ChemistryOptions
         return new HalogenationOptions
         {
             Table = bdes,
+            Calibration = ReadCalibration(parsed.GetValue(calibration)),
             MergeDiastereotopic = parsed.GetValue(merge),
             Stereo = withStereo ? ReadStereo(parsed) : ProductStereoMode.Mark,
         };
@@ -104,18 +108,21 @@ internal sealed class ChemistryOptions
     internal ProductStereoMode ReadStereo(ParseResult parsed) =>
         Enum.Parse<ProductStereoMode>(parsed.GetValue(stereo)!, ignoreCase: true);
 
-    internal static BdeTable ReadTable(string file)
+    internal static BdeTable ReadTable(string file) => BdeTable.Parse(Path.GetFileName(file), ReadText(file));
+
+    internal static SelectivityCalibration ReadCalibration(string? file) => file is null
+        ? SelectivityCalibration.Default
+        : SelectivityCalibration.Parse(Path.GetFileName(file), ReadText(file));
+
+    internal static string ReadText(string file)
     {
-        string text;
         try
         {
-            text = File.ReadAllText(file);
+            return File.ReadAllText(file);
         }
         catch (Exception error) when (error is IOException or UnauthorizedAccessException)
         {
             throw new ToolException(ExitCode.InputOutput, $"cannot read {file}: {error.Message}");
         }
-
-        return BdeTable.Parse(Path.GetFileName(file), text);
     }
 }

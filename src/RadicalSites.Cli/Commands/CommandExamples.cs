@@ -7,6 +7,7 @@ internal static class CommandExamples
 {
     internal static readonly Dictionary<string, string> ByCommand = new()
     {
+        ["calibrate"] = "  radicalsites calibrate measured.csv --output own.csv\n  radicalsites predict 'CC(C)C' --reagent Cl2 --calibration own.csv",
         ["completion"] = "  radicalsites completion bash > ~/.local/share/bash-completion/completions/radicalsites\n  radicalsites completion fish | source",
         ["conditions"] = "  radicalsites conditions CCC --want 'CC(C)Br'\n  radicalsites conditions 'CC(C)C' --want 'CC(C)CCl' --temperature 25C --format json",
         ["course"] = "  radicalsites course 'Cc1ccccc1' --reagent Cl2 --temperature 100C\n  radicalsites course C --reagent Cl2 --equivalents 4 --format json",

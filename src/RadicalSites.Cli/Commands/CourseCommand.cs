@@ -38,7 +38,7 @@ internal static class CourseCommand
                 MaximumHalogens = (int)Within(parsed.GetValue(halogens), 1, 64, "--halogens"),
             };
             HalogenationCourse Follow(Molecule molecule) =>
-                CourseCalculator.Follow(molecule, conditions, bounds, analysis.Table, host.Cancellation);
+                CourseCalculator.Follow(molecule, conditions, bounds, analysis.Table, analysis.Calibration, host.Cancellation);
             OutputPlan plan = RecordPlans.Of(
                 options,
                 (writer, source, molecule) => JsonReport.Write(writer, source, conditions, analysis.Table.Version, Follow(molecule)),

@@ -12,13 +12,16 @@ using RadicalSites.Thermochemistry;
 namespace RadicalSites.Cli.Commands;
 
 /// <summary>The command <c>data</c>: tables, versions, sources.</summary>
-internal static class DataCommand
+internal static partial class DataCommand
 {
     internal static Command Build(ToolHost host)
     {
         var command = new Command("data", "Tables, versions and sources.");
         command.Subcommands.Add(Simple("reagents", "Halogen sources with carrier, by-product and range.", Reagents));
         command.Subcommands.Add(Simple("solvents", "Solvents with density, heat capacity, boiling point.", Solvents));
+        command.Subcommands.Add(Simple("parameters", "Parameters of the selectivity model with their fitted shifts.", Parameters));
+        command.Subcommands.Add(Bench());
+        command.Subcommands.Add(Simple("schema", "The JSON Schema of the records.", static writer => writer.Write(ReportSchema.Text)));
         command.Subcommands.Add(Bde());
         command.Subcommands.Add(Sources());
         command.Subcommands.Add(Check());

@@ -22,21 +22,21 @@ internal sealed class RecordOptions
     private readonly string[] formats;
     private readonly Option<string> format;
 
-    private readonly Option<string?> inputFormat = new("--input-format") { Description = "Format of inputs whose name does not say it." };
+    private readonly Option<string?> inputFormat = new("--input-format") { Description = "Format of inputs whose name does not say it: smi." };
 
-    private readonly Option<string?> output = new("--output") { Description = "Write to this file; it appears under its name when complete." };
+    private readonly Option<string?> output = new("--output") { Description = "Write to this file; it gets its name when it is whole. Its ending decides the format when --format is not given." };
     private readonly Option<string> onError = new("--on-error")
     {
-        Description = "What to do after a record that cannot be read: continue or stop.",
+        Description = "After a record that cannot be read: continue or stop.",
         DefaultValueFactory = static _ => "continue",
     };
 
-    private readonly Option<int> threads = new("--threads") { Description = "Threads; 0 = one for each core. The output does not depend on it." };
-    private readonly Option<long?> limit = new("--limit") { Description = "Stop after this many records (exit code 4 when there are more)." };
+    private readonly Option<int> threads = new("--threads") { Description = "Threads; one for each core when not given. The output does not depend on it." };
+    private readonly Option<long?> limit = new("--limit") { Description = "Stop after this many records; exit code 4 when there are more." };
     private readonly Option<string?> shard = new("--shard") { Description = "Part K of N by record number, as K/N; outputs joined in order equal one run." };
     private readonly Option<bool> resume = new("--resume") { Description = "Go on after the last complete record of an interrupted run with --output." };
-    private readonly Option<bool> quiet = new("--quiet") { Description = "No progress on standard error." };
-    private readonly Option<bool> noColor = new("--no-color") { Description = "No colour (the tool uses none)." };
+    private readonly Option<bool> quiet = new("--quiet") { Description = "No progress on standard error; failures are still reported." };
+    private readonly Option<bool> noColor = new("--no-color") { Description = "No colour; output is plain text in any case." };
 
     internal RecordOptions(params string[] formats)
     {

@@ -18,6 +18,7 @@ public static partial class CourseCalculator
     /// <param name="conditions">Reagent, temperature and solvent.</param>
     /// <param name="options">Bounds, or <see langword="null"/> for the defaults.</param>
     /// <param name="table">Table of bond enthalpies; the shipped one when not given.</param>
+    /// <param name="calibration">Fitted parameters; the shipped fit when not given.</param>
     /// <param name="cancellation">Ends the calculation.</param>
     /// <returns>
     /// Species, curve, best mono yield and by-products; a single point and no optimum when no site of the substrate reacts.
@@ -25,11 +26,11 @@ public static partial class CourseCalculator
     /// <exception cref="ArgumentOutOfRangeException">An option is out of its range.</exception>
     public static HalogenationCourse Follow(
         Molecule substrate, ReactionConditions conditions, CourseOptions? options = null, BdeTable? table = null,
-        CancellationToken cancellation = default)
+        SelectivityCalibration? calibration = null, CancellationToken cancellation = default)
     {
         ArgumentNullException.ThrowIfNull(substrate);
         ArgumentNullException.ThrowIfNull(conditions);
-        var rates = new ModelReactions(conditions, table ?? BdeTable.Default);
+        var rates = new ModelReactions(conditions, table ?? BdeTable.Default, calibration);
         HalogenationCourse course = Follow(
             substrate, conditions.Reagent.Carrier.Id, conditions.Temperature.Kelvin, rates.Of,
             options ?? new CourseOptions(), cancellation);
@@ -37,11 +38,12 @@ public static partial class CourseCalculator
     }
 
     /// <summary>Products and rates of any molecule by the selectivity model, with a count of what it could not tell.</summary>
-    private sealed class ModelReactions(ReactionConditions conditions, BdeTable table)
+    private sealed class ModelReactions(
+        ReactionConditions conditions, BdeTable table, SelectivityCalibration? calibration)
     {
         private static readonly ProductOptions Options = new() { GivesUnknownSplitToDirect = true };
 
-        private readonly SelectivityModel model = new(conditions, table);
+        private readonly SelectivityModel model = new(conditions, table, calibration);
         private readonly BdeAssigner assigner = new(table);
         private readonly SortedSet<string> unsplit = new(StringComparer.Ordinal);
         private int unrated;
