@@ -13,11 +13,14 @@ internal sealed class RecordOptions
 {
     private readonly Argument<string[]> inputs = new("INPUT")
     {
-        Description = "SMILES, or a file (.smi, .smiles, also .gz), or - for standard input (SMILES, white space, name).",
+        Description = "SMILES, or a file (.smi, .smiles, .mol, .sdf, also .gz), or - for standard input (SMILES, white space, name).",
         Arity = ArgumentArity.ZeroOrMore,
     };
 
-    private static readonly Dictionary<string, RecordFormat> FormatNames = new() { ["smi"] = RecordFormat.Smiles };
+    private static readonly Dictionary<string, RecordFormat> FormatNames = new()
+    {
+        ["smi"] = RecordFormat.Smiles, ["mol"] = RecordFormat.Molfile, ["sdf"] = RecordFormat.Sdf,
+    };
 
     private readonly string[] formats;
     private readonly Option<string> format;

@@ -77,7 +77,7 @@ internal sealed class InputItem
         Stream stream = text.EndsWith(".gz", StringComparison.OrdinalIgnoreCase)
             ? new GZipStream(stored, CompressionMode.Decompress)
             : stored;
-        return new LineSplitter(stream, Name);
+        return Format == RecordFormat.Smiles ? new LineSplitter(stream, Name) : new BlockSplitter(stream, Name, Format);
     }
 
     private static RecordFormat? FormatOf(string name)
@@ -87,6 +87,8 @@ internal sealed class InputItem
         {
             var e when e.Equals(".smi", StringComparison.OrdinalIgnoreCase) => RecordFormat.Smiles,
             var e when e.Equals(".smiles", StringComparison.OrdinalIgnoreCase) => RecordFormat.Smiles,
+            var e when e.Equals(".mol", StringComparison.OrdinalIgnoreCase) => RecordFormat.Molfile,
+            var e when e.Equals(".sdf", StringComparison.OrdinalIgnoreCase) => RecordFormat.Sdf,
             _ => null,
         };
     }

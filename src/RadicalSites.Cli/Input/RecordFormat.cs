@@ -5,4 +5,10 @@ internal enum RecordFormat
 {
     /// <summary>One SMILES a line, white space, optional name.</summary>
     Smiles,
+
+    /// <summary>A molfile, or several separated as in SDF.</summary>
+    Molfile,
+
+    /// <summary>Molfiles with data items, each ended by $$$$.</summary>
+    Sdf,
 }

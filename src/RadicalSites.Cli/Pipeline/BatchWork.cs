@@ -6,6 +6,7 @@ using RadicalSites.Cli.Input;
 using RadicalSites.Cli.Output;
 using RadicalSites.Diagnostics;
 using RadicalSites.Formats.Smiles;
+using RadicalSites.Formats.Streams;
 using RadicalSites.Molecules;
 using RadicalSites.Reporting;
 
@@ -47,7 +48,7 @@ internal sealed class BatchWork : IDisposable
     /// <summary>Computes the records one by one; stops after the current one when asked to.</summary>
     internal void Compute(RecordWriter writer, bool stopOnError, CancellationToken cancellation)
     {
-        foreach (RawRecord record in Batch.Records)
+        foreach (Input.RawRecord record in Batch.Records)
         {
             if (cancellation.IsCancellationRequested)
             {
@@ -75,14 +76,16 @@ internal sealed class BatchWork : IDisposable
         }
     }
 
-    private bool Compute(RecordWriter writer, RawRecord record)
+    private bool Compute(RecordWriter writer, Input.RawRecord record)
     {
         int before = Output.Length;
         RecordSource source = new(record.Number, null, null);
         FormatProblem? problem = null;
         try
         {
-            Molecule? molecule = ReadSmiles(record, ref source, out problem);
+            Molecule? molecule = Batch.Format == RecordFormat.Smiles
+                ? ReadSmiles(record, ref source, out problem)
+                : ReadBlock(record, ref source, out problem);
             if (molecule is not null)
             {
                 writer.Write(source, molecule, Output);
@@ -113,7 +116,7 @@ internal sealed class BatchWork : IDisposable
         return false;
     }
 
-    private Molecule? ReadSmiles(RawRecord record, ref RecordSource source, out FormatProblem? problem)
+    private Molecule? ReadSmiles(Input.RawRecord record, ref RecordSource source, out FormatProblem? problem)
     {
         string line = Decode(Batch.BytesOf(record));
         int end = line.AsSpan().IndexOfAny(' ', '\t');
@@ -121,6 +124,22 @@ internal sealed class BatchWork : IDisposable
         string? name = end < 0 ? null : line.AsSpan(end).Trim(" \t").ToString();
         source = new RecordSource(record.Number, smiles, string.IsNullOrEmpty(name) ? null : name);
         return SmilesReader.TryParse(smiles, out Molecule? molecule, out problem) ? molecule : null;
+    }
+
+    private Molecule? ReadBlock(Input.RawRecord record, ref RecordSource source, out FormatProblem? problem)
+    {
+        string text = Decode(Batch.BytesOf(record));
+        InputRecord block = RecordReader.Parse(new Formats.Streams.RawRecord
+        {
+            Number = record.Number,
+            FirstLine = record.Line,
+            LastLine = record.Line,
+            Format = InputFormat.Sdf,
+            Text = text,
+        });
+        source = new RecordSource(record.Number, null, block.Name);
+        problem = block.Problem;
+        return block.Molecule;
     }
 
     // Old files carry names in Latin-1; reading them as such loses nothing.
