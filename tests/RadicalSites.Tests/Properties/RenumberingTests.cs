@@ -1,6 +1,7 @@
 using System;
 using System.Collections.Generic;
 using System.Linq;
+using System.Threading.Tasks;
 using RadicalSites.Canonical;
 using RadicalSites.Formats.Smiles;
 using RadicalSites.Molecules;
@@ -40,6 +41,26 @@ public sealed class RenumberingTests
 
     [Fact]
     public void Symmetry_is_the_same_for_every_order_of_random_molecules() => CheckSymmetry(Invented(1000), 2);
+
+    [Fact]
+    public void Canonical_smiles_and_symmetry_are_the_same_on_every_thread()
+    {
+        Molecule[] molecules = [.. Chosen.Select(static text => SmilesReader.Parse(text)), .. Invented(300)];
+        string[] alone = Array.ConvertAll(molecules, Describe);
+        string[] together = new string[molecules.Length];
+
+        Parallel.For(0, molecules.Length, new ParallelOptions { MaxDegreeOfParallelism = 8 }, i => together[i] = Describe(molecules[i]));
+
+        Assert.Equal(alone, together);
+
+        static string Describe(Molecule molecule)
+        {
+            SymmetryAnalysis symmetry = SymmetryAnalysis.Perceive(molecule);
+            return CanonicalSmiles.Write(molecule) + " " + string.Join(
+                ' ', Enumerable.Range(0, molecule.AtomCount).Select(
+                    atom => (symmetry.OrbitOf(atom, EquivalenceLevel.Homotopic), symmetry.HydrogenTopicity(atom))));
+        }
+    }
 
     private static IEnumerable<Molecule> Invented(int count)
     {
