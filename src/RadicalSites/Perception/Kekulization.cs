@@ -41,6 +41,10 @@ internal static class Kekulization
 
                 need[i] = NeedOf(draft, scratch, i);
             }
+            else if (draft.Atoms[i].Element == 0 && (scratch.AtomFlags[i] & AtomFlags.Ring) != 0)
+            {
+                need[i] = Optional;
+            }
         }
 
         MarkCandidates(draft, scratch, bonds, need);
@@ -119,8 +123,11 @@ internal static class Kekulization
 
             if (valence > sigma)
             {
-                // Two open valences on N, O or S mean an open shell beside a lone pair, not a pi bond.
-                return valence - sigma == 1 || atom.Element is 6 or 14 ? Needed : NoNeed;
+                // Two open valences on N, O or S mean an open shell beside a lone pair, not a pi bond; a nitrogen cation
+                // has no lone pair.
+                return valence - sigma == 1 || atom.Element is 6 or 14 || atom is { Element: 7 or 15, Charge: > 0 }
+                    ? Needed
+                    : NoNeed;
             }
         }
 

@@ -105,6 +105,7 @@ internal sealed partial class SmilesParse
         char joined = first != '\0' && first != '-' ? first : symbol == '/' ? '\\' : symbol == '\\' ? '/' : symbol != '\0' ? symbol : first;
         bool bothAromatic = draft.Atoms[begin].IsAromatic && draft.Atoms[end].IsAromatic;
         AddBond(begin, end, joined, bothAromatic, position);
+        LeaveOpenBesideWildcard(begin, end, joined);
         if (markCount > 0)
         {
             if (opening.Carrier >= 0)

@@ -89,6 +89,17 @@ internal sealed partial class SmilesParse
             return CompleteAllene(ref mark);
         }
 
+        // The short forms @ and @@ follow the number of neighbours: @TB1, @TB2 with five, @OH1, @OH2 with six.
+        if (mark.Kind == StereoKind.Tetrahedral && mark.Count > 4)
+        {
+            mark.Kind = mark.Count switch
+            {
+                5 => StereoKind.TrigonalBipyramidal,
+                6 => StereoKind.Octahedral,
+                _ => mark.Kind,
+            };
+        }
+
         int expected = mark.Kind switch
         {
             StereoKind.TrigonalBipyramidal => 5,

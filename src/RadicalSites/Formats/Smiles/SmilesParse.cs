@@ -228,6 +228,7 @@ internal sealed partial class SmilesParse
         if (previous >= 0)
         {
             AddBond(previous, index, bondSymbol, aromatic && draft.Atoms[previous].IsAromatic, bondPosition);
+            LeaveOpenBesideWildcard(previous, index, bondSymbol);
             if (markCount > 0)
             {
                 AppendCarrier(previous, index);
@@ -274,6 +275,17 @@ internal sealed partial class SmilesParse
             default:
                 bond.Order = BondOrder.Single;
                 break;
+        }
+    }
+
+    // A wildcard may be an aromatic atom: *1ccccc1 has a Kekule form with a double bond to it.
+    private void LeaveOpenBesideWildcard(int begin, int end, char symbol)
+    {
+        ref BuilderAtom first = ref draft.Atoms[begin];
+        ref BuilderAtom second = ref draft.Atoms[end];
+        if (symbol == '\0' && ((first.Element == 0 && second.IsAromatic) || (second.Element == 0 && first.IsAromatic)))
+        {
+            draft.Bonds[draft.BondCount - 1].Order = BondOrder.Unknown;
         }
     }
 
