@@ -3,20 +3,25 @@ using System.Collections.Generic;
 using System.Globalization;
 using System.Linq;
 using RadicalSites.Diagnostics;
+using RadicalSites.Quantities;
 
 namespace RadicalSites;
 
 /// <summary>Reads a user's measured ratios for a calibration.</summary>
 /// <remarks>
-/// CSV with the columns smiles, reagent, celsius and either percent or area; optional are experiment, solvent, product
-/// (SMILES), site (1-based, as the list of sites numbers it), sigma (in the unit of percent or area) and note. Rows of the
-/// same experiment, smiles, reagent, celsius and solvent belong together. One row with a percentage alone is completed by
-/// the rest. Stateless and safe for use by many threads.
+/// CSV with the columns smiles (or substrate), reagent, temperature (80C or 353K; or celsius), product (SMILES) or site
+/// (1-based, as the list of sites numbers it), and percent or area; optional are experiment (or id), solvent, sigma (in the
+/// unit of percent or area) and note. Rows of the same experiment, substrate, reagent, temperature and solvent belong
+/// together. One row with a percentage alone is completed by the rest. Files with the columns of the shipped distributions
+/// are read as such. Stateless and safe for use by many threads.
 /// </remarks>
 public static class CalibrationData
 {
-    private static readonly string[] Required = ["smiles", "reagent", "celsius"];
-    private static readonly string[] Optional = ["experiment", "solvent", "product", "site", "percent", "area", "sigma", "note"];
+    private static readonly string[] Columns =
+    [
+        "experiment", "id", "smiles", "substrate", "temperature", "celsius", "solvent", "product", "site", "percent", "area",
+        "sigma", "note", "kind", "split", "source", "locator", "confidence",
+    ];
 
     /// <summary>Reads measured ratios.</summary>
     /// <param name="name">Name for messages.</param>
@@ -27,18 +32,22 @@ public static class CalibrationData
     {
         ArgumentNullException.ThrowIfNull(name);
         ArgumentNullException.ThrowIfNull(text);
-        CsvTable table = CsvTable.Read(name, text, Required, Optional);
-        if (!table.Columns.Contains("percent") && !table.Columns.Contains("area"))
+        CsvTable table = CsvTable.Read(name, text, ["reagent"], Columns);
+        if (table.Columns.Contains("split"))
         {
-            throw new TableFormatException(name, 1, "percent", "a column percent or area is needed.");
+            return LiteratureDistributions.Read(name, text);
         }
+
+        NeedOne(table, "smiles", "substrate");
+        NeedOne(table, "temperature", "celsius");
+        NeedOne(table, "percent", "area");
 
         var experiments = new List<List<CsvRow>>();
         var places = new Dictionary<string, int>(StringComparer.Ordinal);
         foreach (CsvRow row in table.Rows)
         {
-            string key = string.Join('\u001f', row.Text("experiment"), row.Required("smiles"),
-                row.Required("reagent"), row.Required("celsius"), row.Text("solvent"));
+            string key = string.Join('\u001f', Experiment(row), Substrate(row), row.Required("reagent"),
+                row.Text("temperature"), row.Text("celsius"), row.Text("solvent"));
             if (!places.TryGetValue(key, out int place))
             {
                 places[key] = place = experiments.Count;
@@ -73,13 +82,13 @@ public static class CalibrationData
         }
 
         string solvent = first.Text("solvent");
-        string experiment = first.Text("experiment");
+        string experiment = Experiment(first);
         return new MeasuredDistribution
         {
             Id = experiment.Length > 0 ? experiment : number.ToString(CultureInfo.InvariantCulture),
-            Substrate = first.Required("smiles"),
+            Substrate = Substrate(first),
             Reagent = first.Required("reagent"),
-            Celsius = first.Number("celsius", -273.15, 2000),
+            Celsius = Celsius(first),
             Solvent = solvent.Length == 0 ? null : solvent,
             Products = products,
             IsMeasured = true,
@@ -89,6 +98,31 @@ public static class CalibrationData
             Confidence = "medium",
             Note = first.Text("note"),
         };
+    }
+
+    private static void NeedOne(CsvTable table, string column, string other)
+    {
+        if (!table.Columns.Contains(column) && !table.Columns.Contains(other))
+        {
+            throw new TableFormatException(table.Name, 1, column, $"a column {column} or {other} is needed.");
+        }
+    }
+
+    private static string Experiment(CsvRow row) => row.Text("experiment") is { Length: > 0 } text ? text : row.Text("id");
+
+    private static string Substrate(CsvRow row) =>
+        row.Text("smiles") is { Length: > 0 } text ? text
+        : row.Text("substrate") is { Length: > 0 } other ? other
+        : throw row.Error("smiles", "the field is empty.");
+
+    private static double Celsius(CsvRow row)
+    {
+        string text = row.Text("temperature") is { Length: > 0 } given ? given : row.Text("celsius");
+        return Temperature.TryParse(text, out Temperature temperature)
+            ? temperature.Celsius
+            : throw row.Error(
+                row.Text("temperature").Length > 0 ? "temperature" : "celsius",
+                $"'{text}' is no temperature above absolute zero; write 80C or 353K.");
     }
 
     private static MeasuredProduct Product(CsvRow row, string unit, double scale)

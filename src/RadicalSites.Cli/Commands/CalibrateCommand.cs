@@ -21,8 +21,8 @@ internal static class CalibrateCommand
             "Parameters of the model fitted to measured ratios, with their uncertainty.");
         var measured = new Argument<string>("MEASURED")
         {
-            Description = "CSV file, one row for each product: id, substrate, reagent, celsius, product, percent, and solvent where it "
-                + "matters. The rows of one experiment share an id.",
+            Description = "CSV file, one row for each product: smiles, reagent, temperature, product (SMILES) or site, percent or area; "
+                + "sigma, solvent and experiment where they matter.",
         };
         var output = new Option<string?>("--output") { Description = "Write the fitted parameters here, for --calibration of other commands." };
         var start = new Option<string?>("--calibration") { Description = "Start from this earlier calibration instead of the shipped fit." };
@@ -38,7 +38,7 @@ internal static class CalibrateCommand
         command.SetAction(parsed =>
         {
             string file = parsed.GetValue(measured)!;
-            IReadOnlyList<MeasuredDistribution> data = LiteratureDistributions.Read(Path.GetFileName(file), ChemistryOptions.ReadText(file));
+            IReadOnlyList<MeasuredDistribution> data = CalibrationData.Read(Path.GetFileName(file), ChemistryOptions.ReadText(file));
             CalibrationReport report = SelectivityCalibrator.Fit(data, new CalibrationOptions
             {
                 Name = Path.GetFileNameWithoutExtension(file),

@@ -19,7 +19,7 @@ internal sealed class ChemistryOptions
     };
 
     private readonly Option<string?> temperature = new("--temperature") { Description = "80C or 353K; a bare number is in C. Default: the usual one of the reagent." };
-    private readonly Option<string?> solvent = new("--solvent") { Description = "Id of the solvent, see 'data solvents'; default: gas or inert solvent." };
+    private readonly Option<string?> solvent = new("--solvent") { Description = "Id of the solvent, see 'data solvents' (PhH@4M: diluted), gas or neat; default: not stated." };
     private readonly Option<string?> table = new("--bde-table") { Description = "Your own table of bond enthalpies, laid over the shipped one." };
     private readonly Option<string?> calibration = new("--calibration") { Description = "Parameters fitted to your own ratios, as written by 'calibrate'." };
     private readonly Option<bool> merge = new("--merge-diastereotopic") { Description = "One site for carbons that only existing stereo tells apart." };
@@ -83,9 +83,10 @@ internal sealed class ChemistryOptions
             return null;
         }
 
-        return Heat.HeatTables.FindSolvent(id)?.Id ?? throw new ToolException(
+        return Heat.HeatTables.FindSolvent(id)?.Id ?? ReactionMedia.Find(id) ?? throw new ToolException(
             ExitCode.WrongUsage,
-            $"there is no solvent '{id}'; known are {string.Join(", ", Heat.HeatTables.Solvents.Select(static s => s.Id))}.");
+            $"there is no solvent '{id}'; known are {string.Join(", ", Heat.HeatTables.Solvents.Select(static s => s.Id))}, "
+            + "gas, neat (the substrate itself), and solvents diluted as in PhH@4M.");
     }
 
     internal HalogenationOptions ReadOptions(ParseResult parsed, bool withStereo)

@@ -22,7 +22,7 @@ internal static partial class DataCommand
             TextWriter writer = parsed.InvocationConfiguration.Output;
             string? own = parsed.GetValue(file);
             BenchReport report = LiteratureBench.Run(
-                own is null ? null : LiteratureDistributions.Read(Path.GetFileName(own), ChemistryOptions.ReadText(own)),
+                own is null ? null : CalibrationData.Read(Path.GetFileName(own), ChemistryOptions.ReadText(own)),
                 new HalogenationOptions { Calibration = ChemistryOptions.ReadCalibration(parsed.GetValue(calibration)) });
             if (parsed.GetValue(parity))
             {

@@ -10,7 +10,10 @@ public sealed record ReactionConditions
     /// <summary>Makes conditions.</summary>
     /// <param name="reagent">The halogen source.</param>
     /// <param name="temperature">Temperature; the usual one of the reagent when not given.</param>
-    /// <param name="solvent">Id of the only solvent when it matters (see the table media), otherwise <see langword="null"/>.</param>
+    /// <param name="solvent">
+    /// Medium: <c>gas</c>, <c>neat</c>, or the id of a solvent, with its concentration when it is diluted (<c>PhH@4M</c>);
+    /// <see langword="null"/> when not stated, which is taken as between a gas and an inert liquid.
+    /// </param>
     public ReactionConditions(Reagent reagent, Temperature? temperature = null, string? solvent = null)
     {
         ArgumentNullException.ThrowIfNull(reagent);
@@ -25,6 +28,6 @@ public sealed record ReactionConditions
     /// <summary>The temperature.</summary>
     public Temperature Temperature { get; }
 
-    /// <summary>Id of the solvent, or <see langword="null"/> for a gas or an inert solvent.</summary>
+    /// <summary>The medium as given, or <see langword="null"/> when not stated.</summary>
     public string? Solvent { get; }
 }

@@ -31,6 +31,9 @@ internal static class SelectivityParameters
     /// <summary>Row of a solvent, or null; case is ignored.</summary>
     internal static MediumRow? Medium(string solvent) => Tables.Media.GetValueOrDefault(solvent);
 
+    /// <summary>Ids of all media, ascending.</summary>
+    internal static IReadOnlyList<string> MediumIds { get; } = [.. Tables.Media.Keys.Order(StringComparer.Ordinal)];
+
     private static class Tables
     {
         internal static readonly FrozenDictionary<string, ClassRate[]> Rates = ReadRates();
