@@ -21,8 +21,12 @@ internal sealed class StructureDraft
     /// <summary>Set by a reader that saw an uncharged hydrogen atom that may be folded.</summary>
     internal bool HasHydrogenAtoms;
 
+    /// <summary>Whether atoms with more bonds than their valence are taken as written.</summary>
+    internal bool AcceptsAnyValence;
+
     internal void Clear()
     {
+        AcceptsAnyValence = false;
         AtomCount = 0;
         BondCount = 0;
         StereoCount = 0;

@@ -59,7 +59,7 @@ internal static class ValenceModel
             if (valences.Length > 0)
             {
                 int highest = valences[^1];
-                if (bonds > highest && IsOctetElement(atom.Element) && !IsKnownException(atom, bonds))
+                if (bonds > highest && !draft.AcceptsAnyValence && IsOctetElement(atom.Element) && !IsKnownException(atom, bonds))
                 {
                     return TooManyBonds(atom, i, bonds, highest);
                 }

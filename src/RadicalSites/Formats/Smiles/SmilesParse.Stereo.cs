@@ -121,7 +121,7 @@ internal sealed partial class SmilesParse
 
         if (mark.Count != expected)
         {
-            return Fail(
+            return lenient || Fail(
                 Entry.StereoNeighbors, draft.Atoms[atom].Position, atom, mark.Count,
                 mark.Configuration == 1 ? "@" : mark.Kind == StereoKind.Tetrahedral ? "@@" : mark.Kind.ToString());
         }
@@ -192,7 +192,7 @@ internal sealed partial class SmilesParse
 
         if (filled != 4)
         {
-            return Fail(Entry.StereoNeighbors, draft.Atoms[mark.Atom].Position, mark.Atom, filled, "@AL");
+            return lenient || Fail(Entry.StereoNeighbors, draft.Atoms[mark.Atom].Position, mark.Atom, filled, "@AL");
         }
 
         draft.AddStereo(new StereoElement(StereoKind.Allene, mark.Atom, mark.Atom, carriers.ToArray(), mark.Configuration));

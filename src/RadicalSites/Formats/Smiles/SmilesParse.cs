@@ -19,21 +19,35 @@ internal sealed partial class SmilesParse
     private DirectionMark[] directions = new DirectionMark[8];
     private int directionCount;
     private FormatProblem? failure;
+    private bool lenient;
 
     private int previous;
     private char bondSymbol;
     private int bondPosition;
 
-    internal Molecule? Read(ReadOnlySpan<char> text, out FormatProblem? problem)
+    internal Molecule? Read(ReadOnlySpan<char> text, SmilesReaderOptions options, out FormatProblem? problem)
     {
         draft.Clear();
+        lenient = options.IsLenient;
+        draft.AcceptsAnyValence = lenient;
+        if (lenient)
+        {
+            text = text.Trim();
+            int end = text.IndexOfAny(' ', '\t');
+            text = end < 0 ? text : text[..end];
+        }
+
         openingCount = 0;
         markCount = 0;
         directionCount = 0;
         failure = null;
         previous = -1;
         bondSymbol = '\0';
-        bool ok = text.Length > 0 ? Scan(text) : Fail(Entry.Empty, 0);
+        bool ok = text.Length == 0
+            ? Fail(Entry.Empty, 0)
+            : text.Length > options.LongestText
+                ? Fail(Entry.TooLong, options.LongestText, text.Length, options.LongestText)
+                : Scan(text);
         ok = ok && CompleteStereo();
         problem = failure;
         if (!ok)

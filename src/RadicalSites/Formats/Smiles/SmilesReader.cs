@@ -20,8 +20,17 @@ public static class SmilesReader
     /// <param name="text">SMILES without white space.</param>
     /// <returns>The molecule; atoms in the order of the text.</returns>
     /// <exception cref="SmilesFormatException">The text is no SMILES, or describes an impossible molecule.</exception>
-    public static Molecule Parse(ReadOnlySpan<char> text) =>
-        TryParse(text, out Molecule? molecule, out FormatProblem? problem) ? molecule : throw new SmilesFormatException(problem);
+    public static Molecule Parse(ReadOnlySpan<char> text) => Parse(text, SmilesReaderOptions.Strict);
+
+    /// <summary>Reads a molecule.</summary>
+    /// <param name="text">SMILES.</param>
+    /// <param name="options">How strictly to read.</param>
+    /// <returns>The molecule; atoms in the order of the text.</returns>
+    /// <exception cref="SmilesFormatException">The text is no SMILES, or describes an impossible molecule.</exception>
+    public static Molecule Parse(ReadOnlySpan<char> text, SmilesReaderOptions options) =>
+        TryParse(text, options, out Molecule? molecule, out FormatProblem? problem)
+            ? molecule
+            : throw new SmilesFormatException(problem);
 
     /// <summary>Reads a molecule without throwing.</summary>
     /// <param name="text">SMILES without white space.</param>
@@ -30,10 +39,22 @@ public static class SmilesReader
     /// <returns>Whether the text is a molecule.</returns>
     public static bool TryParse(
         ReadOnlySpan<char> text, [NotNullWhen(true)] out Molecule? molecule,
+        [NotNullWhen(false)] out FormatProblem? problem) =>
+        TryParse(text, SmilesReaderOptions.Strict, out molecule, out problem);
+
+    /// <summary>Reads a molecule without throwing.</summary>
+    /// <param name="text">SMILES.</param>
+    /// <param name="options">How strictly to read.</param>
+    /// <param name="molecule">The molecule on success.</param>
+    /// <param name="problem">What is wrong otherwise.</param>
+    /// <returns>Whether the text is a molecule.</returns>
+    public static bool TryParse(
+        ReadOnlySpan<char> text, SmilesReaderOptions options, [NotNullWhen(true)] out Molecule? molecule,
         [NotNullWhen(false)] out FormatProblem? problem)
     {
+        ArgumentNullException.ThrowIfNull(options);
         SmilesParse parse = parseOfThread ??= new SmilesParse();
-        molecule = parse.Read(text, out problem);
+        molecule = parse.Read(text, options, out problem);
         if (molecule is not null)
         {
             problem = null;
