@@ -212,7 +212,7 @@ internal static class CoordinationCodes
             slots[opposite] = 5;
 
             // U runs around; Z and 4 cross the square once between the second and third or the third and fourth.
-            ReadOnlySpan<int> path = shape switch { 'U' => [1, 2, 3, 4], 'Z' => [1, 2, 4, 3], _ => [1, 3, 2, 4] };
+            ReadOnlySpan<int> path = shape switch { 'U' => [1, 2, 3, 4], 'Z' => [1, 2, 4, 3], _ => [1, 3, 4, 2] };
             int place = 0;
             for (int carrier = 1; carrier < 6; carrier++)
             {

@@ -8,7 +8,7 @@ namespace RadicalSites.Perception;
 /// <remarks>
 /// <para>Pi electrons that an atom brings: 1 with a double bond on a ring; 0 with a double bond out of the ring to an
 /// element more electronegative than carbon, for a carbocation or a boron without double bond; 2 for N, P, As with three
-/// single bonds, O, S, Se, Te with two, a carbanion, and N- with two. Atoms with sp3 character, with an exocyclic C=C, or
+/// single bonds, O, S, Se, Te with two, a carbanion, and N- with two. Atoms with sp3 character, wildcards, atoms with an exocyclic C=C, or
 /// S and P with exocyclic oxygen do not take part.</para>
 /// <para>Tested are the smallest rings through each angle, then envelopes of up to <see cref="LargestUnion"/> fused rings
 /// (azulene); only the bonds of the ring or envelope that satisfies the rule become aromatic. The result does not depend
@@ -241,7 +241,11 @@ internal static partial class AromaticityModel
 
         if (ringDoubles == 1)
         {
-            return atom.Element is 5 or 6 or 7 or 8 or 15 or 16 or 33 or 34 or 52 or 0 && partners <= 3 ? 1 : None;
+            // An atom that lower case would be read without a double bond (hypervalent nitrogen, odd charges) stays Kekule.
+            return atom.Element is 5 or 6 or 7 or 8 or 15 or 16 or 33 or 34 or 52 && partners <= 3
+                && Kekulization.TakesDouble(Valences.Of(atom.Element, atom.Charge), partners, atom.Element, atom.Charge)
+                ? 1
+                : None;
         }
 
         if (outerDoubles == 1)

@@ -114,24 +114,28 @@ internal static class Kekulization
             sigma += atom.Hydrogens;
         }
 
+        return TakesDouble(valences, sigma, atom.Element, atom.Charge) ? Needed : NoNeed;
+    }
+
+    /// <summary>Whether an aromatic atom with so many sigma bonds and hydrogens is read as one that needs a double bond.</summary>
+    internal static bool TakesDouble(ReadOnlySpan<byte> valences, int sigma, int element, int charge)
+    {
         foreach (byte valence in valences)
         {
             if (valence == sigma)
             {
-                return NoNeed;
+                return false;
             }
 
             if (valence > sigma)
             {
                 // Two open valences on N, O or S mean an open shell beside a lone pair, not a pi bond; a nitrogen cation
                 // has no lone pair.
-                return valence - sigma == 1 || atom.Element is 6 or 14 || atom is { Element: 7 or 15, Charge: > 0 }
-                    ? Needed
-                    : NoNeed;
+                return valence - sigma == 1 || element is 6 or 14 || (element is 7 or 15 && charge > 0);
             }
         }
 
-        return NoNeed;
+        return false;
     }
 
     // Pairs atoms that have a single free partner, again and again; then pairs the next free atom with its first partner.

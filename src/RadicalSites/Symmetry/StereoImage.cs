@@ -150,5 +150,6 @@ internal static class StereoImage
         (graph.Focus[element] == begin && graph.FocusEnd[element] == end)
         || (graph.Focus[element] == end && graph.FocusEnd[element] == begin);
 
-    private static int ImageOf(int atom, int[] image) => image[atom] < 0 ? atom : image[atom];
+    // A carrier of -1 is an implicit hydrogen and stays one.
+    private static int ImageOf(int atom, int[] image) => atom < 0 || image[atom] < 0 ? atom : image[atom];
 }
