@@ -79,7 +79,7 @@ public sealed record ConditionRanking
             Substrate = substrate,
             Wanted = target,
             Conditions = Array.ConvertAll(ranked, static one => one.Ranked),
-            DataVersion = options.Table.Version,
+            DataVersion = options.DataVersion,
             Diagnostics = ranked.Length > 0
                 ? ranked[0].Prediction.Diagnostics
                 : [Diagnostic.Create(ProblemCatalogue.General.NotAProduct, [], target, CanonicalSmiles.Write(substrate))],

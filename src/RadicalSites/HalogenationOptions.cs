@@ -22,4 +22,9 @@ public sealed record HalogenationOptions
 
     /// <summary>How product stereo is written; existing centres kept and new ones unmarked by default.</summary>
     public ProductStereoMode Stereo { get; init; } = ProductStereoMode.Mark;
+
+    /// <summary>Version of the data in use: that of the table, and the name of a calibration that is not the shipped one.</summary>
+    public string DataVersion => ReferenceEquals(Calibration, SelectivityCalibration.Default)
+        ? Table.Version
+        : Table.Version + "+" + Calibration.Name;
 }

@@ -79,7 +79,7 @@ public sealed class HalogenationPredictor
             Sites = Join(analysis, bdes, selectivity, products.Products),
             Products = products.Products,
             Interference = interference,
-            DataVersion = Options.Table.Version,
+            DataVersion = Options.DataVersion,
             Diagnostics = HalogenationRemarks.Common(analysis, bdes, remarks),
         };
     }

@@ -115,6 +115,9 @@ internal sealed class ChemistryOptions
         ? SelectivityCalibration.Default
         : SelectivityCalibration.Parse(Path.GetFileName(file), ReadText(file));
 
+    /// <summary>What of the data decides the bytes of an output.</summary>
+    internal static string IdentityOf(HalogenationOptions options) => options.DataVersion + "\n" + options.Calibration.ToText();
+
     internal static string ReadText(string file)
     {
         try

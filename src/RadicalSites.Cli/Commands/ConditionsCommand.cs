@@ -37,7 +37,7 @@ internal static class ConditionsCommand
                 options,
                 (writer, source, molecule) => JsonReport.Write(writer, source, Rank(molecule)),
                 (writer, source, molecule) => TextReport.Write(writer, source, Rank(molecule)));
-            return new RecordRun(host, options, plan, analysis.Table.Version).Run();
+            return new RecordRun(host, options, plan, ChemistryOptions.IdentityOf(analysis)).Run();
         });
         return command;
     }

@@ -41,9 +41,9 @@ internal static class CourseCommand
                 CourseCalculator.Follow(molecule, conditions, bounds, analysis.Table, analysis.Calibration, host.Cancellation);
             OutputPlan plan = RecordPlans.Of(
                 options,
-                (writer, source, molecule) => JsonReport.Write(writer, source, conditions, analysis.Table.Version, Follow(molecule)),
-                (writer, source, molecule) => TextReport.Write(writer, source, conditions, analysis.Table.Version, Follow(molecule)));
-            return new RecordRun(host, options, plan, analysis.Table.Version).Run();
+                (writer, source, molecule) => JsonReport.Write(writer, source, conditions, analysis.DataVersion, Follow(molecule)),
+                (writer, source, molecule) => TextReport.Write(writer, source, conditions, analysis.DataVersion, Follow(molecule)));
+            return new RecordRun(host, options, plan, ChemistryOptions.IdentityOf(analysis)).Run();
         });
         return command;
     }

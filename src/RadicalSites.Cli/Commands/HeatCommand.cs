@@ -48,7 +48,7 @@ internal static class HeatCommand
                     ? amount
                     : throw new ToolException(ExitCode.WrongUsage, $"--batch takes an amount such as 10g or 50mmol, not '{parsed.GetValue(batch)}'."),
                 Equivalents = CourseCommand.Within(parsed.GetValue(equivalents), 1e-6, 1000, "--equivalents"),
-                Solvent = conditions.Solvent is { } id ? HeatTables.FindSolvent(id) : null,
+                Solvent = conditions.Solvent is { } id ? HeatTables.FindSolvent(id.Split('@')[0]) : null,
                 SolventMilliliters = parsed.GetValue(milliliters) is { } volume ? CourseCommand.Within(volume, 1e-9, 1e9, "--solvent-volume") : null,
                 MixtureJoulesPerGramKelvin = parsed.GetValue(capacity) is { } value ? CourseCommand.Within(value, 0.1, 10, "--heat-capacity") : null,
                 Start = conditions.Temperature,
@@ -80,7 +80,7 @@ internal static class HeatCommand
                     (Prediction prediction, HeatReport report) = Reckon(molecule);
                     TextReport.Write(writer, source, prediction, report);
                 });
-            return new RecordRun(host, options, plan, predictor.Options.Table.Version).Run();
+            return new RecordRun(host, options, plan, ChemistryOptions.IdentityOf(predictor.Options)).Run();
         });
         return command;
     }

@@ -30,7 +30,7 @@ internal static class PredictCommand
             var predictor = new HalogenationPredictor(
                 chemistry.ReadConditions(parsed), chemistry.ReadOptions(parsed, withStereo: true));
             CsvShape shape = parsed.GetValue(rows) == "sites" ? CsvShape.PredictedSites : CsvShape.Products;
-            return new RecordRun(host, options, Plan(options, predictor, shape), predictor.Options.Table.Version).Run();
+            return new RecordRun(host, options, Plan(options, predictor, shape), ChemistryOptions.IdentityOf(predictor.Options)).Run();
         });
         return command;
     }

@@ -5,6 +5,7 @@ using System.Globalization;
 using System.Linq;
 using RadicalSites.Cli.Input;
 using RadicalSites.Cli.Pipeline;
+using RadicalSites.Formats.Streams;
 
 namespace RadicalSites.Cli.Commands;
 
@@ -13,19 +14,19 @@ internal sealed class RecordOptions
 {
     private readonly Argument<string[]> inputs = new("INPUT")
     {
-        Description = "SMILES, or a file (.smi, .smiles, .mol, .sdf, also .gz), or - for standard input (SMILES, white space, name).",
+        Description = "SMILES, or a file (.smi, .smiles, .mol, .sdf, also .gz), or - for standard input. A line of .smi is SMILES, white space, optional name.",
         Arity = ArgumentArity.ZeroOrMore,
     };
 
-    private static readonly Dictionary<string, RecordFormat> FormatNames = new()
+    private static readonly Dictionary<string, InputFormat> FormatNames = new()
     {
-        ["smi"] = RecordFormat.Smiles, ["mol"] = RecordFormat.Molfile, ["sdf"] = RecordFormat.Sdf,
+        ["smi"] = InputFormat.Smiles, ["mol"] = InputFormat.Molfile, ["sdf"] = InputFormat.Sdf,
     };
 
     private readonly string[] formats;
     private readonly Option<string> format;
 
-    private readonly Option<string?> inputFormat = new("--input-format") { Description = "Format of inputs whose name does not say it: smi." };
+    private readonly Option<string?> inputFormat = new("--input-format") { Description = "Format of inputs whose name does not say it: smi, mol or sdf; smi when not given." };
 
     private readonly Option<string?> output = new("--output") { Description = "Write to this file; it gets its name when it is whole. Its ending decides the format when --format is not given." };
     private readonly Option<string> onError = new("--on-error")
@@ -73,7 +74,7 @@ internal sealed class RecordOptions
                 : ["-"];
         }
 
-        RecordFormat? forced = parsed.GetValue(inputFormat) is { } name ? FormatNames[name] : null;
+        InputFormat? forced = parsed.GetValue(inputFormat) is { } name ? FormatNames[name] : null;
         InputItem[] items = Array.ConvertAll(given, text => ReadInput(text, forced, host, parsed));
         if (items.Count(static item => item.IsStandardInput) > 1)
         {
@@ -120,7 +121,7 @@ internal sealed class RecordOptions
         };
     }
 
-    private static InputItem ReadInput(string text, RecordFormat? forced, ToolHost host, ParseResult parsed)
+    private static InputItem ReadInput(string text, InputFormat? forced, ToolHost host, ParseResult parsed)
     {
         // No SMILES starts with a hyphen, so this is a mistyped option.
         if (text.Length > 1 && text[0] == '-')

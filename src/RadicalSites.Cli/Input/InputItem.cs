@@ -2,6 +2,7 @@ using System;
 using System.IO;
 using System.IO.Compression;
 using System.Text;
+using RadicalSites.Formats.Streams;
 
 namespace RadicalSites.Cli.Input;
 
@@ -11,7 +12,7 @@ internal sealed class InputItem
     private readonly string text;
     private readonly Stream? standardInput;
 
-    private InputItem(string text, RecordFormat format, bool isFile, Stream? standardInput)
+    private InputItem(string text, InputFormat format, bool isFile, Stream? standardInput)
     {
         this.text = text;
         this.standardInput = standardInput;
@@ -19,7 +20,7 @@ internal sealed class InputItem
         IsFile = isFile;
     }
 
-    internal RecordFormat Format { get; }
+    internal InputFormat Format { get; }
 
     internal bool IsFile { get; }
 
@@ -34,14 +35,14 @@ internal sealed class InputItem
     internal long? StoredLength => IsFile ? new FileInfo(text).Length : null;
 
     /// <summary>Decides what an INPUT is: a file that exists, a name with a known ending, or else a SMILES.</summary>
-    internal static InputItem Of(string text, RecordFormat? forced, Stream standardInput)
+    internal static InputItem Of(string text, InputFormat? forced, Stream standardInput)
     {
         if (text == "-")
         {
-            return new InputItem("-", forced ?? RecordFormat.Smiles, false, standardInput);
+            return new InputItem("-", forced ?? InputFormat.Smiles, false, standardInput);
         }
 
-        RecordFormat? byName = FormatOf(text);
+        InputFormat? byName = FormatOf(text);
         if (File.Exists(text))
         {
             return new InputItem(text, forced ?? byName ?? throw new ToolException(
@@ -49,14 +50,14 @@ internal sealed class InputItem
         }
 
         return byName is null && !Directory.Exists(text)
-            ? new InputItem(text, RecordFormat.Smiles, false, null)
+            ? new InputItem(text, InputFormat.Smiles, false, null)
             : throw new ToolException(ExitCode.InputOutput, 
                 Directory.Exists(text) ? $"{text} is a folder, not a file." : $"{text}: there is no such file.");
     }
 
     /// <summary>Opens the input at its start.</summary>
     /// <param name="stored">The stream as stored, to tell how far reading has come; <see langword="null"/> for arguments.</param>
-    internal RecordSplitter Open(out Stream? stored)
+    internal IRecordFeed Open(out Stream? stored)
     {
         if (IsArgument)
         {
@@ -74,28 +75,39 @@ internal sealed class InputItem
             throw new ToolException(ExitCode.InputOutput, $"{Name}: cannot open: {problem.Message}", problem);
         }
 
-        Stream stream = text.EndsWith(".gz", StringComparison.OrdinalIgnoreCase)
-            ? new GZipStream(stored, CompressionMode.Decompress)
-            : stored;
-        return Format == RecordFormat.Smiles ? new LineSplitter(stream, Name) : new BlockSplitter(stream, Name, Format);
+        if (Format != InputFormat.Smiles)
+        {
+            return new BlockFeed(stored, Name, Format, IsStandardInput);
+        }
+
+        return new LineSplitter(Unpack(stored), Name);
     }
 
-    private static RecordFormat? FormatOf(string name)
+    // By the first two bytes, so that a wrong file name does no harm and packed standard input works.
+    private static Stream Unpack(Stream stream)
+    {
+        var start = new byte[2];
+        int read = stream.ReadAtLeast(start, 2, throwOnEndOfStream: false);
+        var whole = new PrefixedStream(start.AsMemory(0, read), stream);
+        return read == 2 && start[0] == 0x1F && start[1] == 0x8B ? new GZipStream(whole, CompressionMode.Decompress) : whole;
+    }
+
+    private static InputFormat? FormatOf(string name)
     {
         ReadOnlySpan<char> plain = name.EndsWith(".gz", StringComparison.OrdinalIgnoreCase) ? name.AsSpan(0, name.Length - 3) : name;
         return Path.GetExtension(plain) switch
         {
-            var e when e.Equals(".smi", StringComparison.OrdinalIgnoreCase) => RecordFormat.Smiles,
-            var e when e.Equals(".smiles", StringComparison.OrdinalIgnoreCase) => RecordFormat.Smiles,
-            var e when e.Equals(".mol", StringComparison.OrdinalIgnoreCase) => RecordFormat.Molfile,
-            var e when e.Equals(".sdf", StringComparison.OrdinalIgnoreCase) => RecordFormat.Sdf,
+            var e when e.Equals(".smi", StringComparison.OrdinalIgnoreCase) => InputFormat.Smiles,
+            var e when e.Equals(".smiles", StringComparison.OrdinalIgnoreCase) => InputFormat.Smiles,
+            var e when e.Equals(".mol", StringComparison.OrdinalIgnoreCase) => InputFormat.Molfile,
+            var e when e.Equals(".sdf", StringComparison.OrdinalIgnoreCase) => InputFormat.Sdf,
             _ => null,
         };
     }
 
     // An argument is one record, the empty one included: that is an error of the record, not of the command line.
     private sealed class ArgumentSplitter(string text)
-        : RecordSplitter(new MemoryStream(Encoding.UTF8.GetBytes(text + "\n")), "argument", RecordFormat.Smiles, 0)
+        : RecordSplitter(new MemoryStream(Encoding.UTF8.GetBytes(text + "\n")), "argument", 0)
     {
         protected override int FindEnd(ReadOnlySpan<byte> data, int from, bool isLast) => isLast ? data.Length : 0;
 

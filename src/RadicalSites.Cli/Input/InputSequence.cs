@@ -10,7 +10,7 @@ internal sealed class InputSequence(IReadOnlyList<InputItem> items) : IDisposabl
 {
     private int next;
     private long number = 1;
-    private RecordSplitter? current;
+    private IRecordFeed? current;
     private Stream? stored;
     private long finishedBytes;
 
@@ -65,7 +65,7 @@ internal sealed class InputSequence(IReadOnlyList<InputItem> items) : IDisposabl
                 Close();
             }
 
-            if (batch.Records.Count > 0)
+            if (batch.Count > 0)
             {
                 return true;
             }
@@ -90,7 +90,7 @@ internal sealed class InputSequence(IReadOnlyList<InputItem> items) : IDisposabl
         return number - first;
     }
 
-    private RecordSplitter? Current()
+    private IRecordFeed? Current()
     {
         if (current is null && next < items.Count)
         {

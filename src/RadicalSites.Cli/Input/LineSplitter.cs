@@ -3,8 +3,8 @@ using System.IO;
 
 namespace RadicalSites.Cli.Input;
 
-/// <summary>One record a line; blank lines are no records.</summary>
-internal sealed class LineSplitter(Stream stream, string source) : RecordSplitter(stream, source, RecordFormat.Smiles)
+/// <summary>One record a line; blank lines and lines that start with # are no records.</summary>
+internal sealed class LineSplitter(Stream stream, string source) : RecordSplitter(stream, source)
 {
     protected override int FindEnd(ReadOnlySpan<byte> data, int from, bool isLast)
     {
@@ -16,6 +16,6 @@ internal sealed class LineSplitter(Stream stream, string source) : RecordSplitte
     {
         Line++;
         kept = record.Trim(" \t\r\n"u8);
-        return !kept.IsEmpty;
+        return !kept.IsEmpty && kept[0] != (byte)'#';
     }
 }

@@ -1,5 +1,6 @@
 using System;
 using System.Collections.Generic;
+using RadicalSites.Formats.Streams;
 
 namespace RadicalSites.Cli.Input;
 
@@ -12,14 +13,20 @@ internal sealed class RecordBatch
     private byte[] data = new byte[4096];
     private int length;
 
+    /// <summary>Lines of SMILES.</summary>
     internal List<RawRecord> Records { get; } = [];
 
-    internal RecordFormat Format { get; set; }
+    /// <summary>Records of a molfile or SDF.</summary>
+    internal List<Formats.Streams.RawRecord> Blocks { get; } = [];
+
+    internal int Count => Records.Count + Blocks.Count;
+
+    internal InputFormat Format { get; set; }
 
     /// <summary>Name of the source for messages.</summary>
     internal string Source { get; set; } = "";
 
-    internal bool IsFull => Records.Count >= MostRecords || length >= MostBytes;
+    internal bool IsFull => Count >= MostRecords || length >= MostBytes;
 
     internal ReadOnlySpan<byte> BytesOf(RawRecord record) => data.AsSpan(record.Start, record.Length);
 
@@ -35,8 +42,15 @@ internal sealed class RecordBatch
         length += record.Length;
     }
 
+    internal void Add(Formats.Streams.RawRecord block)
+    {
+        Blocks.Add(block);
+        length += block.Text.Length;
+    }
+
     internal void Clear()
     {
+        Blocks.Clear();
         Records.Clear();
         length = 0;
         if (data.Length > 4 * MostBytes)

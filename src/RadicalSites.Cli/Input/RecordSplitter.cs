@@ -1,12 +1,13 @@
 using System;
 using System.Globalization;
 using System.IO;
+using RadicalSites.Formats.Streams;
 
 namespace RadicalSites.Cli.Input;
 
 /// <summary>Cuts a stream into records without understanding them; memory is bounded by the largest record.</summary>
-internal abstract class RecordSplitter(Stream stream, string source, RecordFormat format, long firstLine = 1)
-    : IDisposable
+internal abstract class RecordSplitter(Stream stream, string source, long firstLine = 1)
+    : IRecordFeed
 {
     private const int LargestRecord = 1 << 28;
 
@@ -17,9 +18,9 @@ internal abstract class RecordSplitter(Stream stream, string source, RecordForma
     private bool atEnd;
     private bool isFirstRead = true;
 
-    internal RecordFormat Format => format;
+    public InputFormat Format => InputFormat.Smiles;
 
-    internal string Source => source;
+    public string Source => source;
 
     /// <summary>1-based line of the next record.</summary>
     protected long Line { get; set; } = firstLine;
@@ -30,12 +31,8 @@ internal abstract class RecordSplitter(Stream stream, string source, RecordForma
         GC.SuppressFinalize(this);
     }
 
-    /// <summary>Reads records until the batch is full, the input ends, or the next read could block.</summary>
-    /// <param name="batch">Batch to add to, or <see langword="null"/> to skip.</param>
-    /// <param name="most">Most records to read, 1 or more.</param>
-    /// <param name="number">Number of the next record; counted on.</param>
-    /// <returns>Whether the input goes on.</returns>
-    internal bool Read(RecordBatch? batch, long most, ref long number)
+    /// <inheritdoc/>
+    public bool Read(RecordBatch? batch, long most, ref long number)
     {
         long read = 0;
         while (read < most && batch is not { IsFull: true })
@@ -100,9 +97,14 @@ internal abstract class RecordSplitter(Stream stream, string source, RecordForma
 
         try
         {
-            int count = stream.Read(buffer, end, buffer.Length - end);
-            end += count;
-            atEnd = count == 0;
+            // The first read goes on until a byte order mark could be told.
+            do
+            {
+                int count = stream.Read(buffer, end, buffer.Length - end);
+                end += count;
+                atEnd = count == 0;
+            }
+            while (isFirstRead && end < 3 && !atEnd);
         }
         catch (Exception problem) when (problem is IOException or InvalidDataException or UnauthorizedAccessException)
         {

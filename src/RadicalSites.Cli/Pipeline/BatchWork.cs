@@ -15,6 +15,9 @@ namespace RadicalSites.Cli.Pipeline;
 /// <summary>One batch on its way through the pipeline: records in, bytes out.</summary>
 internal sealed class BatchWork : IDisposable
 {
+    /// <summary>Longest SMILES that is read, in characters; a longer one is a failed record.</summary>
+    internal const int LongestSmiles = 1 << 20;
+
     private static readonly UTF8Encoding Strict = new(false, throwOnInvalidBytes: true);
 
     internal RecordBatch Batch { get; } = new();
@@ -48,18 +51,13 @@ internal sealed class BatchWork : IDisposable
     /// <summary>Computes the records one by one; stops after the current one when asked to.</summary>
     internal void Compute(RecordWriter writer, bool stopOnError, CancellationToken cancellation)
     {
-        foreach (Input.RawRecord record in Batch.Records)
+        for (int i = 0; i < Batch.Count && !cancellation.IsCancellationRequested; i++)
         {
-            if (cancellation.IsCancellationRequested)
-            {
-                return;
-            }
-
             int before = Output.Length;
             bool isOk;
             try
             {
-                isOk = Compute(writer, record);
+                isOk = Compute(writer, i);
             }
             catch (OperationCanceledException) when (cancellation.IsCancellationRequested)
             {
@@ -76,16 +74,18 @@ internal sealed class BatchWork : IDisposable
         }
     }
 
-    private bool Compute(RecordWriter writer, Input.RawRecord record)
+    private bool Compute(RecordWriter writer, int index)
     {
         int before = Output.Length;
-        RecordSource source = new(record.Number, null, null);
+        bool isLine = Batch.Format == InputFormat.Smiles;
+        long number = isLine ? Batch.Records[index].Number : Batch.Blocks[index].Number;
+        RecordSource source = new(number, null, null);
         FormatProblem? problem = null;
         try
         {
-            Molecule? molecule = Batch.Format == RecordFormat.Smiles
-                ? ReadSmiles(record, ref source, out problem)
-                : ReadBlock(record, ref source, out problem);
+            Molecule? molecule = isLine
+                ? ReadSmiles(Batch.Records[index], ref source, out problem)
+                : ReadBlock(Batch.Blocks[index], ref source, out problem);
             if (molecule is not null)
             {
                 writer.Write(source, molecule, Output);
@@ -111,7 +111,8 @@ internal sealed class BatchWork : IDisposable
         }
 
         Output.Truncate(before);
-        Failures.Add(new RecordFailure(record.Number, record.Line, Batch.Source, problem!));
+        Failures.Add(new RecordFailure(
+            number, isLine ? Batch.Records[index].Line : Batch.Blocks[index].FirstLine, Batch.Source, problem!));
         writer.WriteProblem(source, problem!, Output);
         return false;
     }
@@ -122,24 +123,29 @@ internal sealed class BatchWork : IDisposable
         int end = line.AsSpan().IndexOfAny(' ', '\t');
         string smiles = end < 0 ? line : line[..end];
         string? name = end < 0 ? null : line.AsSpan(end).Trim(" \t").ToString();
-        source = new RecordSource(record.Number, smiles, string.IsNullOrEmpty(name) ? null : name);
+        bool isTooLong = smiles.Length > LongestSmiles;
+        source = new RecordSource(record.Number, isTooLong ? smiles[..80] + "..." : smiles, string.IsNullOrEmpty(name) ? null : name);
+        if (isTooLong)
+        {
+            problem = new FormatProblem
+            {
+                Descriptor = ProblemCatalogue.Smiles.TooLong,
+                Message = ProblemCatalogue.Smiles.TooLong.Format(smiles.Length, LongestSmiles),
+                Position = LongestSmiles,
+            };
+            return null;
+        }
+
         return SmilesReader.TryParse(smiles, out Molecule? molecule, out problem) ? molecule : null;
     }
 
-    private Molecule? ReadBlock(Input.RawRecord record, ref RecordSource source, out FormatProblem? problem)
+    private static Molecule? ReadBlock(
+        Formats.Streams.RawRecord record, ref RecordSource source, out FormatProblem? problem)
     {
-        string text = Decode(Batch.BytesOf(record));
-        InputRecord block = RecordReader.Parse(new Formats.Streams.RawRecord
-        {
-            Number = record.Number,
-            FirstLine = record.Line,
-            LastLine = record.Line,
-            Format = InputFormat.Sdf,
-            Text = text,
-        });
-        source = new RecordSource(record.Number, null, block.Name);
-        problem = block.Problem;
-        return block.Molecule;
+        InputRecord read = RecordReader.Parse(record);
+        source = new RecordSource(record.Number, null, read.Name) { Remarks = read.Remarks };
+        problem = read.Problem;
+        return read.Molecule;
     }
 
     // Old files carry names in Latin-1; reading them as such loses nothing.

@@ -199,7 +199,7 @@ internal sealed class RecordPipeline
             return false;
         }
 
-        remaining -= work.Batch.Records.Count;
+        remaining -= work.Batch.Count;
         return true;
     }
 
@@ -219,7 +219,7 @@ internal sealed class RecordPipeline
             return false;
         }
 
-        return work.Completed == work.Batch.Records.Count;
+        return work.Completed == work.Batch.Count;
     }
 
     private static Task Start(Action action) =>

@@ -52,7 +52,7 @@ public static class CsvReport
         {
             Begin(ref row, source, report.CanonicalSmiles);
             Site(ref row, report.Molecule, site);
-            End(ref row, report.Diagnostics);
+            End(ref row, source, report.Diagnostics);
         }
 
         Empty(ref row, source, report.CanonicalSmiles, report.Sites.Count, CsvShape.Sites, report.Diagnostics);
@@ -76,7 +76,7 @@ public static class CsvReport
                 Begin(ref row, source, prediction.CanonicalSmiles);
                 Conditions(ref row, prediction);
                 Product(ref row, product);
-                End(ref row, prediction.Diagnostics);
+                End(ref row, source, prediction.Diagnostics);
             }
 
             Empty(ref row, source, prediction.CanonicalSmiles, prediction.Products.Count, shape, prediction.Diagnostics);
@@ -89,7 +89,7 @@ public static class CsvReport
             Conditions(ref row, prediction);
             Site(ref row, prediction.Molecule, site);
             Rate(ref row, site);
-            End(ref row, prediction.Diagnostics);
+            End(ref row, source, prediction.Diagnostics);
         }
 
         Empty(ref row, source, prediction.CanonicalSmiles, prediction.Sites.Count, shape, prediction.Diagnostics);
@@ -126,7 +126,7 @@ public static class CsvReport
             row.Text(product.Degeneracy.ToString(System.Globalization.CultureInfo.InvariantCulture));
             row.Atoms(enumeration.Molecule, product.HalogenCarbons);
             row.List(product.Stereoisomers ?? [], static text => text);
-            End(ref row, enumeration.Diagnostics);
+            End(ref row, source, enumeration.Diagnostics);
         }
 
         IReadOnlyList<Diagnostic> remarks =
@@ -175,9 +175,9 @@ public static class CsvReport
         row.Text(canonicalSmiles);
     }
 
-    private static void End(ref CsvFields row, IReadOnlyList<Diagnostic> diagnostics)
+    private static void End(ref CsvFields row, RecordSource source, IReadOnlyList<Diagnostic> diagnostics)
     {
-        row.List(diagnostics, static diagnostic => diagnostic.Code);
+        row.List(source.Remarks.Count == 0 ? diagnostics : [.. source.Remarks, .. diagnostics], static diagnostic => diagnostic.Code);
         row.Skip(2);
         row.EndRow();
     }
@@ -190,7 +190,7 @@ public static class CsvReport
         {
             Begin(ref row, source, canonicalSmiles);
             row.Skip(Count(Columns(shape)));
-            End(ref row, diagnostics);
+            End(ref row, source, diagnostics);
         }
     }
 

@@ -46,6 +46,6 @@ public static partial class JsonReport
         }
 
         writer.WriteEndArray();
-        End(writer, ranking.Substrate, ranking.Diagnostics);
+        End(writer, source, ranking.Substrate, ranking.Diagnostics);
     }
 }

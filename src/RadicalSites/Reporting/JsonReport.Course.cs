@@ -36,7 +36,7 @@ public static partial class JsonReport
         Points(writer, course.Points);
         ByProducts(writer, course.ByProducts);
         writer.WriteEndObject();
-        End(writer, substrate, course.Diagnostics);
+        End(writer, source, substrate, course.Diagnostics);
     }
 
     private static void Best(Utf8JsonWriter writer, CourseOptimum? best)

@@ -33,7 +33,7 @@ public static partial class JsonReport
         Number(writer, "solventBoilingPointCelsius"u8, report.SolventBoilingPointCelsius);
         Parts(writer, report);
         writer.WriteEndObject();
-        End(writer, prediction.Molecule, report.Diagnostics);
+        End(writer, source, prediction.Molecule, report.Diagnostics);
     }
 
     private static void Parts(Utf8JsonWriter writer, HeatReport report)

@@ -52,7 +52,7 @@ public static partial class JsonReport
         IReadOnlyList<Diagnostic> remarks = complete
             ? enumeration.Diagnostics
             : [.. enumeration.Diagnostics, ProductLimit(limit)];
-        End(writer, enumeration.Molecule, remarks);
+        End(writer, source, enumeration.Molecule, remarks);
         return complete;
     }
 

@@ -24,7 +24,7 @@ public static partial class JsonReport
         Conditions(writer, prediction.Conditions);
         Sites(writer, prediction.Molecule, prediction.Sites);
         Products(writer, prediction.Molecule, prediction.Products);
-        End(writer, prediction.Molecule, prediction.Diagnostics);
+        End(writer, source, prediction.Molecule, prediction.Diagnostics);
     }
 
     private static void Conditions(Utf8JsonWriter writer, ReactionConditions conditions)

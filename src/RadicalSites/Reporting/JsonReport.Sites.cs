@@ -23,7 +23,7 @@ public static partial class JsonReport
         writer.WriteString("canonicalSmiles"u8, report.CanonicalSmiles);
         writer.WriteString("dataVersion"u8, report.DataVersion);
         Sites(writer, report.Molecule, report.Sites);
-        End(writer, report.Molecule, report.Diagnostics);
+        End(writer, source, report.Molecule, report.Diagnostics);
     }
 
     private static void Sites(Utf8JsonWriter writer, Molecule molecule, IReadOnlyList<SitePrediction> sites)

@@ -75,9 +75,18 @@ public static partial class JsonReport
         writer.WriteString("name"u8, source.Name);
     }
 
-    private static void End(Utf8JsonWriter writer, Molecule molecule, IReadOnlyList<Diagnostic> diagnostics)
+    private static void End(
+        Utf8JsonWriter writer, RecordSource source, Molecule molecule, IReadOnlyList<Diagnostic> diagnostics)
     {
         writer.WriteStartArray("diagnostics"u8);
+        Remarks(writer, molecule, source.Remarks);
+        Remarks(writer, molecule, diagnostics);
+        writer.WriteEndArray();
+        writer.WriteEndObject();
+    }
+
+    private static void Remarks(Utf8JsonWriter writer, Molecule molecule, IReadOnlyList<Diagnostic> diagnostics)
+    {
         for (int i = 0; i < diagnostics.Count; i++)
         {
             Diagnostic diagnostic = diagnostics[i];
@@ -88,9 +97,6 @@ public static partial class JsonReport
             Atoms(writer, "atoms"u8, molecule, diagnostic.Atoms);
             writer.WriteEndObject();
         }
-
-        writer.WriteEndArray();
-        writer.WriteEndObject();
     }
 
     private static void Atoms(

@@ -48,7 +48,7 @@ public static partial class TextReport
             table.Write(writer);
         }
 
-        Remarks(writer, course.Diagnostics);
+        Remarks(writer, [.. source.Remarks, .. course.Diagnostics]);
     }
 
     /// <summary>Writes a heat balance.</summary>
@@ -82,7 +82,7 @@ public static partial class TextReport
         figures.Add("adiabatic end", Three(report.EndCelsius), "C");
         figures.Add("solvent boils", Three(report.SolventBoilingPointCelsius), "C");
         figures.Write(writer);
-        Remarks(writer, report.Diagnostics);
+        Remarks(writer, [.. source.Remarks, .. report.Diagnostics]);
     }
 
     /// <summary>Writes a ranking of conditions.</summary>
@@ -112,7 +112,7 @@ public static partial class TextReport
             table.Write(writer);
         }
 
-        Remarks(writer, ranking.Diagnostics);
+        Remarks(writer, [.. source.Remarks, .. ranking.Diagnostics]);
     }
 
     private static void Composition(TextWriter writer, HalogenationCourse course)

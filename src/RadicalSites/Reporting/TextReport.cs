@@ -38,7 +38,7 @@ public static partial class TextReport
         }
 
         table.Write(writer);
-        Remarks(writer, report.Diagnostics);
+        Remarks(writer, [.. source.Remarks, .. report.Diagnostics]);
     }
 
     /// <summary>Writes a prediction.</summary>
@@ -81,7 +81,7 @@ public static partial class TextReport
             products.Write(writer);
         }
 
-        Remarks(writer, prediction.Diagnostics);
+        Remarks(writer, [.. source.Remarks, .. prediction.Diagnostics]);
     }
 
     /// <summary>Writes remarks with severity and code.</summary>
