@@ -25,6 +25,7 @@ internal static partial class DataCommand
         command.Subcommands.Add(Bde());
         command.Subcommands.Add(Sources());
         command.Subcommands.Add(Check());
+        command.Subcommands.Add(Simple("fit", "Group increments fitted to the C-H table, and their leave-one-out test.", FitReport.Write));
         command.SetAction(parsed =>
         {
             TextWriter writer = parsed.InvocationConfiguration.Output;

@@ -93,14 +93,29 @@ public sealed partial class BdeAssigner
     private BdeAssignment Combined(Site site, BdeClassEntry root, string[] names)
     {
         var parts = new List<(BdeClassEntry Entry, double Effect)>();
-        foreach (string name in names)
+        for (int i = 0; i < names.Length; i++)
         {
-            if (table.FindClass("group", name, site.Degree) is not { } entry)
+            // A published value for the repeated group (two aryl groups, two chlorines) goes before the saturation rule.
+            int end = i + 1;
+            while (end < names.Length && names[end] == names[i])
+            {
+                end++;
+            }
+
+            string name = names[i];
+            if (end - i > 1 && table.FindClass("group", string.Join('+', names[i..end]), site.Degree) is { } repeated)
+            {
+                parts.Add((repeated, repeated.KilojoulesPerMole - root.KilojoulesPerMole));
+                i = end - 1;
+            }
+            else if (table.FindClass("group", name, site.Degree) is { } entry)
+            {
+                parts.Add((entry, entry.KilojoulesPerMole - root.KilojoulesPerMole));
+            }
+            else
             {
                 return None(site, $"the group {name} has no published value on a {site.Degree.ToString().ToLowerInvariant()} carbon");
             }
-
-            parts.Add((entry, entry.KilojoulesPerMole - root.KilojoulesPerMole));
         }
 
         parts.Sort(static (left, right) =>

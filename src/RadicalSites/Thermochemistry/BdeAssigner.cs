@@ -81,7 +81,7 @@ public sealed partial class BdeAssigner
         new(entry.Id, value, entry.IsAnalogy ? role + ", analogy" : role, entry.Source, entry.Locator);
 
     // Outside what the classes were made for: ions beside the carbon, metals, boron, phosphorus, isotopic mixtures aside.
-    private static string? OutsideValidity(Molecule molecule, Site site)
+    internal static string? OutsideValidity(Molecule molecule, Site site)
     {
         if (site.FormalCharge != 0)
         {

@@ -4,31 +4,35 @@ using System.Linq;
 
 namespace RadicalSites.Thermochemistry;
 
-/// <summary>The increment model fitted to the preferred C(sp3)-H rows of a table, with its leave-one-out errors.</summary>
+/// <summary>Increments fitted to the preferred rows of a C-H table, with the test of that fit.</summary>
 /// <remarks>Immutable and safe for use by many threads.</remarks>
-/// <param name="Coefficients">Coefficients by name.</param>
-/// <param name="Rows">The rows in table order.</param>
-public sealed record IncrementFit(IReadOnlyList<IncrementCoefficient> Coefficients, IReadOnlyList<IncrementRow> Rows)
+public sealed record IncrementFit
 {
-    /// <summary>Mean absolute leave-one-out error over all rows that can be left out [kJ/mol].</summary>
-    public double LeaveOneOutError => Error(static _ => true);
+    /// <summary>The increments in order of their names.</summary>
+    public required IReadOnlyList<IncrementCoefficient> Coefficients { get; init; }
 
-    /// <summary>The same over hydrocarbons [kJ/mol].</summary>
-    public double LeaveOneOutErrorHydrocarbons => Error(static row => row.IsHydrocarbon);
+    /// <summary>Covariance of the estimates [(kJ/mol)²], rows and columns in the order of <see cref="Coefficients"/>.</summary>
+    public required IReadOnlyList<IReadOnlyList<double>> Covariance { get; init; }
 
-    /// <summary>Median absolute leave-one-out error over all rows that can be left out [kJ/mol].</summary>
-    public double MedianLeaveOneOutError
+    /// <summary>Every fitted row, predicted without itself; in table order.</summary>
+    public required IReadOnlyList<LeaveOneOutRow> LeaveOneOut { get; init; }
+
+    /// <summary>Scatter of the rows about the increments beyond their own sigma [kJ/mol].</summary>
+    public required double ScatterKilojoulesPerMole { get; init; }
+
+    /// <summary>Mean absolute leave-one-out error over all predictable rows [kJ/mol].</summary>
+    public double MeanAbsoluteError => Mean(static _ => true);
+
+    /// <summary>Mean absolute leave-one-out error over the predictable hydrocarbon rows [kJ/mol].</summary>
+    public double MeanAbsoluteErrorHydrocarbons => Mean(static row => row.IsHydrocarbon);
+
+    private double Mean(Func<LeaveOneOutRow, bool> chosen)
     {
-        get
-        {
-            double[] errors = [.. Errors(static _ => true).Order()];
-            return errors.Length == 0 ? 0 : errors[errors.Length / 2];
-        }
+        double[] errors =
+        [
+            .. LeaveOneOut.Where(row => chosen(row) && row.ErrorKilojoulesPerMole is not null)
+                .Select(static row => Math.Abs(row.ErrorKilojoulesPerMole!.Value)),
+        ];
+        return errors.Length == 0 ? double.NaN : errors.Average();
     }
-
-    private double Error(Func<IncrementRow, bool> which) => Errors(which).DefaultIfEmpty(0).Average();
-
-    private IEnumerable<double> Errors(Func<IncrementRow, bool> which) => Rows
-        .Where(row => which(row) && row.LeftOutKilojoulesPerMole is not null)
-        .Select(static row => Math.Abs(row.LeftOutKilojoulesPerMole!.Value - row.Entry.KilojoulesPerMole));
 }

@@ -7,194 +7,97 @@ using RadicalSites.Sites;
 
 namespace RadicalSites.Thermochemistry;
 
-/// <summary>Fits the increment model to the C-H table by weighted least squares.</summary>
+/// <summary>Derives group increments from the rows of a C-H table by weighted least squares.</summary>
 /// <remarks>
-/// <para>Value = base of the degree + ring or bridgehead term + group effects. Of several groups the strongest acts in
-/// full, the second at 0.4, further ones at 0.2 (saturation); which is the strongest follows from the fit itself,
-/// which is repeated until the order no longer changes.</para>
-/// <para>Effects of atoms with lone pairs and of sulfur groups shrink with the degree of the carbon (factors 1, 0.8, 0.6,
-/// 0.5), those of pi groups do not. Rows weigh 1 / (sigma^2 + 5^2).</para>
-/// Stateless and safe for use by many threads.
+/// <para>Model: value = base(number of substituents) + sum of group, repeat, pair, ring and bridgehead terms. Weights are
+/// 1 / (sigma² + scatter²); the scatter is found by iteration so that the weighted sum of squares equals its degrees of
+/// freedom. Leave-one-out errors follow from the leverages, e / (1 - h), which equals refitting without the row.</para>
+/// Rows that take part: preferred rows of C(sp3)-H bonds outside ions, metals and boron. Stateless, safe for many threads.
 /// </remarks>
 public static class IncrementRegression
 {
-    private const double ModelSigma = 5;
-    private const double SecondGroup = 0.4;
-    private const double FurtherGroup = 0.2;
-    private const double Ridge = 1e-6;
-    private const int MostRounds = 20;
-    private static readonly double[] DegreeScale = [1, 0.8, 0.6, 0.5];
+    private const double FullLeverage = 1 - 1e-9;
 
-    /// <summary>Fits the model to the preferred rows of a table.</summary>
-    /// <param name="table">The table; the shipped one when not given.</param>
-    /// <returns>Coefficients and rows.</returns>
+    /// <summary>Fits the increments.</summary>
+    /// <param name="table">A table; the shipped one when not given.</param>
+    /// <returns>The fit.</returns>
+    /// <exception cref="ArgumentException">The table has fewer rows than terms.</exception>
     public static IncrementFit Fit(BdeTable? table = null)
     {
-        Sample[] samples = [.. (table ?? BdeTable.Default).Entries.Where(static entry => entry.IsPreferred).Select(Describe).OfType<Sample>()];
-        string[] names = [.. samples.SelectMany(static sample => sample.Terms.Select(static term => term.Name)).Distinct().Order(StringComparer.Ordinal)];
-        Vector<double> coefficients = Solve(samples, names, out double[,] weights, out Matrix<double> inverse);
-        double variance = Variance(samples, weights, coefficients, names.Length);
-        var list = new IncrementCoefficient[names.Length];
-        for (int j = 0; j < names.Length; j++)
+        Sample[] samples = [.. (table ?? BdeTable.Default).Entries.Where(static entry => entry.IsPreferred).Select(SampleOf).OfType<Sample>()];
+        string[] names = [.. samples.SelectMany(static sample => sample.Terms.Keys).Distinct().Order(StringComparer.Ordinal)];
+        if (samples.Length <= names.Length)
         {
-            int column = j;
-            int rows = Enumerable.Range(0, samples.Length).Count(i => weights[i, column] != 0);
-            list[j] = new IncrementCoefficient(names[j], coefficients[j], Math.Sqrt(variance * inverse[j, j]), rows);
+            throw new ArgumentException("The table has too few C-H rows for a fit of increments.", nameof(table));
         }
 
-        var results = new IncrementRow[samples.Length];
-        for (int i = 0; i < samples.Length; i++)
+        Matrix<double> design = Matrix<double>.Build.Dense(
+            samples.Length, names.Length, (row, column) => samples[row].Terms.GetValueOrDefault(names[column]));
+        Vector<double> values = Vector<double>.Build.Dense(samples.Length, row => samples[row].Entry.KilojoulesPerMole);
+        double scatter = 4;
+        Solution solution = Solve(design, values, samples, scatter);
+        for (int round = 0; round < 60; round++)
         {
-            results[i] = new IncrementRow(
-                samples[i].Entry, samples[i].IsHydrocarbon, Value(weights, i, coefficients), LeftOut(samples, names, i, list));
+            double target = solution.WeightedSquares / Math.Max(1, samples.Length - solution.Rank);
+            scatter = Math.Clamp(scatter * Math.Sqrt(target), 0.5, 30);
+            solution = Solve(design, values, samples, scatter);
         }
 
-        return new IncrementFit(list, results);
+        return new IncrementFit
+        {
+            Coefficients =
+            [
+                .. names.Select((name, i) => new IncrementCoefficient(
+                    name, solution.Estimates[i], Math.Sqrt(Math.Max(0, solution.Covariance[i, i])),
+                    samples.Count(sample => sample.Terms.ContainsKey(name)))),
+            ],
+            Covariance = [.. Enumerable.Range(0, names.Length).Select(i => (IReadOnlyList<double>)solution.Covariance.Row(i).ToArray())],
+            LeaveOneOut = [.. samples.Select((sample, i) => LeftOut(sample, solution, i))],
+            ScatterKilojoulesPerMole = scatter,
+        };
     }
 
-    private static double? LeftOut(Sample[] samples, string[] names, int left, IncrementCoefficient[] all)
+    private static LeaveOneOutRow LeftOut(Sample sample, Solution solution, int row)
     {
-        foreach ((string name, _) in samples[left].Terms)
-        {
-            if (all[Array.IndexOf(names, name)].RowCount < 2)
-            {
-                return null;
-            }
-        }
-
-        Sample[] others = [.. samples.Where((_, index) => index != left)];
-        Vector<double> coefficients = Solve(others, names, out _, out _);
-        double[,] own = Design([samples[left]], names, coefficients);
-        return Value(own, 0, coefficients);
+        double leverage = solution.Leverages[row];
+        double? predicted = leverage > FullLeverage
+            ? null
+            : sample.Entry.KilojoulesPerMole - (solution.Residuals[row] / (1 - leverage));
+        return new LeaveOneOutRow(sample.Entry, predicted, sample.IsHydrocarbon);
     }
 
-    private static Vector<double> Solve(Sample[] samples, string[] names, out double[,] weights, out Matrix<double> inverse)
+    // The pseudo-inverse settles terms that always occur together; their sum is what the data fix.
+    private static Solution Solve(Matrix<double> design, Vector<double> values, Sample[] samples, double scatter)
     {
-        Vector<double> coefficients = Vector<double>.Build.Dense(names.Length);
-        weights = Design(samples, names, coefficients);
-        inverse = Matrix<double>.Build.Dense(1, 1);
-        for (int round = 0; round < MostRounds; round++)
-        {
-            Matrix<double> design = Matrix<double>.Build.DenseOfArray(weights);
-            Vector<double> rowWeights = Vector<double>.Build.Dense(
-                samples.Length, i => 1 / (Square(samples[i].Entry.SigmaKilojoulesPerMole) + Square(ModelSigma)));
-            Vector<double> values = Vector<double>.Build.Dense(samples.Length, i => samples[i].Entry.KilojoulesPerMole);
-            Matrix<double> weighted = design.Transpose() * Matrix<double>.Build.DenseOfDiagonalVector(rowWeights);
-            inverse = ((weighted * design) + (Ridge * Matrix<double>.Build.DenseIdentity(names.Length))).Inverse();
-            coefficients = inverse * (weighted * values);
-            double[,] next = Design(samples, names, coefficients);
-            bool settled = weights.Cast<double>().SequenceEqual(next.Cast<double>());
-            weights = next;
-            if (settled)
-            {
-                break;
-            }
-        }
-
-        return coefficients;
+        Vector<double> roots = Vector<double>.Build.Dense(
+            samples.Length,
+            row => 1 / Math.Sqrt((samples[row].Entry.SigmaKilojoulesPerMole * samples[row].Entry.SigmaKilojoulesPerMole) + (scatter * scatter)));
+        Matrix<double> weighted = Matrix<double>.Build.DiagonalOfDiagonalVector(roots) * design;
+        Matrix<double> inverse = weighted.PseudoInverse();
+        Vector<double> target = roots.PointwiseMultiply(values);
+        Vector<double> estimates = inverse * target;
+        Vector<double> residuals = target - (weighted * estimates);
+        Vector<double> leverages = (weighted * inverse).Diagonal();
+        return new Solution(
+            estimates, inverse * inverse.Transpose(), residuals.PointwiseDivide(roots), leverages,
+            residuals * residuals, weighted.Rank());
     }
 
-    private static double Variance(Sample[] samples, double[,] weights, Vector<double> coefficients, int parameters)
-    {
-        double sum = 0;
-        for (int i = 0; i < samples.Length; i++)
-        {
-            double residual = Value(weights, i, coefficients) - samples[i].Entry.KilojoulesPerMole;
-            sum += residual * residual / (Square(samples[i].Entry.SigmaKilojoulesPerMole) + Square(ModelSigma));
-        }
-
-        return sum / Math.Max(1, samples.Length - parameters);
-    }
-
-    // Row i, column j: how much of coefficient j acts in sample i.
-    private static double[,] Design(Sample[] samples, string[] names, Vector<double> coefficients)
-    {
-        var design = new double[samples.Length, names.Length];
-        for (int i = 0; i < samples.Length; i++)
-        {
-            var groups = new List<(int Column, double Scale, double Effect)>();
-            foreach ((string name, double scale) in samples[i].Terms)
-            {
-                int column = Array.IndexOf(names, name);
-                if (name.StartsWith("group:", StringComparison.Ordinal))
-                {
-                    groups.Add((column, scale, Math.Abs(scale * coefficients[column])));
-                }
-                else
-                {
-                    design[i, column] += scale;
-                }
-            }
-
-            groups.Sort(static (left, right) => right.Effect != left.Effect ? right.Effect.CompareTo(left.Effect) : left.Column.CompareTo(right.Column));
-            for (int rank = 0; rank < groups.Count; rank++)
-            {
-                design[i, groups[rank].Column] += groups[rank].Scale * (rank == 0 ? 1 : rank == 1 ? SecondGroup : FurtherGroup);
-            }
-        }
-
-        return design;
-    }
-
-    private static double Value(double[,] design, int row, Vector<double> coefficients)
-    {
-        double sum = 0;
-        for (int j = 0; j < coefficients.Count; j++)
-        {
-            sum += design[row, j] * coefficients[j];
-        }
-
-        return sum;
-    }
-
-    private static double Square(double value) => value * value;
-
-    private static Sample? Describe(BdeEntry entry)
+    private static Sample? SampleOf(BdeEntry entry)
     {
         SiteAnalysis analysis = SiteFinder.Find(entry.Molecule);
-        Site? site = analysis.SiteOf(entry.Carbon);
-        if (site is null)
+        if (analysis.SiteOf(entry.Carbon) is not { } site || BdeAssigner.OutsideValidity(entry.Molecule, site) is not null)
         {
             return null;
         }
 
-        var terms = new List<(string Name, double Scale)> { ("base:" + site.Degree, 1) };
-        foreach (ConjugatedNeighbor neighbor in site.Conjugation)
-        {
-            terms.Add(("group:" + neighbor.Kind, 1));
-        }
-
-        foreach (AlphaGroup group in site.AlphaGroups)
-        {
-            bool fades = group.Kind is not (AlphaGroupKind.Aldehyde or AlphaGroupKind.Ketone or AlphaGroupKind.CarboxylicAcid
-                or AlphaGroupKind.Ester or AlphaGroupKind.Amide or AlphaGroupKind.Nitrile or AlphaGroupKind.Trifluoromethyl);
-            terms.Add(("group:" + group.Kind, fades ? DegreeScale[(int)site.Degree] : 1));
-        }
-
-        if (site.IsBridgehead && site.Degree == SiteDegree.Tertiary)
-        {
-            terms.Add((site.RingSize <= 5 ? "bridgehead:5" : "bridgehead:6", 1));
-        }
-        else if (site.RingSize is <= 4 || (site.RingSize == 5 && site.Conjugation.Count + site.AlphaGroups.Count == 0))
-        {
-            terms.Add(("ring:" + site.RingSize.Value.ToString(System.Globalization.CultureInfo.InvariantCulture), 1));
-        }
-
-        return new Sample(entry, IsHydrocarbon(entry.Molecule), terms);
+        bool hydrocarbon = entry.Molecule.Atoms.All(static atom => atom.AtomicNumber is 1 or 6);
+        return new Sample(entry, IncrementTerms.Of(entry.Molecule, site), hydrocarbon);
     }
 
-    private static bool IsHydrocarbon(Molecule molecule)
-    {
-        foreach (Atom atom in molecule.AtomSpan)
-        {
-            if (atom.AtomicNumber is not (1 or 6))
-            {
-                return false;
-            }
-        }
+    private sealed record Sample(BdeEntry Entry, Dictionary<string, double> Terms, bool IsHydrocarbon);
 
-        return true;
-    }
-
-    private sealed record Sample(BdeEntry Entry, bool IsHydrocarbon, List<(string Name, double Scale)> Terms);
+    private sealed record Solution(
+        Vector<double> Estimates, Matrix<double> Covariance, Vector<double> Residuals, Vector<double> Leverages,
+        double WeightedSquares, int Rank);
 }

@@ -26,6 +26,18 @@ public sealed class UserTableTests
     }
 
     [Fact]
+    public void Table_alone_has_no_value_where_it_is_silent()
+    {
+        BdeTable table = BdeTable.Parse("own.csv", Header + "x1,C-H,[CH3:1]CC,430,1,OWN,page 3\n");
+
+        SiteReport report = Halogenation.FindSites(SmilesReader.Parse("CCC"), new HalogenationOptions { Table = table });
+
+        Assert.Equal(430, report.Sites[0].Bde.KilojoulesPerMole);
+        Assert.Equal(BdeBasis.None, report.Sites[1].Bde.Basis);
+        Assert.NotEmpty(report.Sites[1].Bde.Reason!);
+    }
+
+    [Fact]
     public void FindEntries_bond_with_several_sources_lists_the_preferred_first()
     {
         SiteReport report = Halogenation.FindSites(SmilesReader.Parse("Cc1ccccc1"));
