@@ -43,6 +43,9 @@ public sealed record Carrier
     /// <summary>Factor on the inductive term of a neighbouring group where the attacked carbon is primary.</summary>
     public required double PrimarySensitivity { get; init; }
 
+    /// <summary>Whether it works in strong acid, where amines, alcohols, ethers and carbonyl groups are protonated.</summary>
+    public required bool ActsInStrongAcid { get; init; }
+
     /// <summary>Highest rate per hydrogen relative to primary that collision or diffusion allows; 0 without a bound.</summary>
     public required double Ceiling { get; init; }
 

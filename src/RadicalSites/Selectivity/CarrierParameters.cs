@@ -32,7 +32,7 @@ internal sealed class CarrierParameters
         for (int i = 0; i < Alpha.Length; i++)
         {
             var kind = (AlphaGroupKind)i;
-            PolarGroup group = SelectivityParameters.Group(kind);
+            PolarGroup group = carrier.ActsInStrongAcid ? Protonated(kind) : SelectivityParameters.Group(kind);
             Sigma[i] = group.SigmaInductive;
             Alpha[i] = carrier.PolarScale
                 * ((late ? group.AlphaLate : group.AlphaEarly) + shifts[ParameterIndex.OfGroup(kind, late, beta: false)]);
@@ -40,6 +40,17 @@ internal sealed class CarrierParameters
                 * ((late ? group.BetaLate : group.BetaEarly) + shifts[ParameterIndex.OfGroup(kind, late, beta: true)]);
         }
     }
+
+    /// <summary>Whether strong acid protonates a group.</summary>
+    internal static bool IsBasic(AlphaGroupKind kind) => kind is AlphaGroupKind.Amine or AlphaGroupKind.Hydroxyl
+        or AlphaGroupKind.Ether or AlphaGroupKind.EsterOxygen or AlphaGroupKind.Ester or AlphaGroupKind.CarboxylicAcid
+        or AlphaGroupKind.Ketone or AlphaGroupKind.Aldehyde or AlphaGroupKind.Amide or AlphaGroupKind.AmideNitrogen
+        or AlphaGroupKind.Sulfide;
+
+    private static PolarGroup Protonated(AlphaGroupKind kind) =>
+        kind == AlphaGroupKind.Amine ? SelectivityParameters.Group(AlphaGroupKind.Ammonium)
+        : IsBasic(kind) ? SelectivityParameters.Oxonium
+        : SelectivityParameters.Group(kind);
 
     /// <summary>Rate classes in the order of <see cref="RateClass"/>.</summary>
     internal ClassRate[] Rates { get; }

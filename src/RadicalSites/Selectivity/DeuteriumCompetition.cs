@@ -69,7 +69,7 @@ internal static class DeuteriumCompetition
             IsBridgehead = false,
             Topicity = Symmetry.Topicity.Homotopic,
         };
-        return rates.Rate(molecule, stand, RateModel.AnchorOf(stand), 0).Value;
+        return rates.Rate(molecule, stand, rates.AnchorOf(stand), 0).Value;
     }
 
     private static bool IsSaturatedCarbon(Molecule molecule, int atom)

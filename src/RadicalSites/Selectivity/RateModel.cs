@@ -98,7 +98,7 @@ internal sealed partial class RateModel
     }
 
     /// <summary>Bond enthalpy of the class of a site [kJ/mol].</summary>
-    internal static double AnchorOf(Site site) => Anchors[(int)ClassOf(site)];
+    internal double AnchorOf(Site site) => Anchors[(int)ClassOf(site)];
 
     private double Slope(Site site, RateClass rateClass, double deviation, out double energy)
     {
@@ -130,7 +130,7 @@ internal sealed partial class RateModel
 
     private static double Square(double value) => value * value;
 
-    private static RateClass ClassOf(Site site)
+    private RateClass ClassOf(Site site)
     {
         int degree = Math.Min(3, (int)site.Degree);
         for (int i = 0; i < site.Conjugation.Count; i++)
@@ -156,7 +156,7 @@ internal sealed partial class RateModel
         return (RateClass)Math.Min(3, degree + donors);
     }
 
-    private static bool HasAcceptor(Site site)
+    private bool HasAcceptor(Site site)
     {
         for (int i = 0; i < site.AlphaGroups.Count; i++)
         {
@@ -169,7 +169,7 @@ internal sealed partial class RateModel
         return false;
     }
 
-    private static bool IsDonor(AlphaGroupKind kind) => kind is AlphaGroupKind.Hydroxyl or AlphaGroupKind.Ether
+    private bool IsDonor(AlphaGroupKind kind) => !(carrier.ActsInStrongAcid && CarrierParameters.IsBasic(kind)) && kind is AlphaGroupKind.Hydroxyl or AlphaGroupKind.Ether
         or AlphaGroupKind.EsterOxygen or AlphaGroupKind.OtherOxygen or AlphaGroupKind.Amine or AlphaGroupKind.AmideNitrogen
         or AlphaGroupKind.AromaticNitrogen or AlphaGroupKind.Sulfide or AlphaGroupKind.Silicon;
 }

@@ -41,7 +41,7 @@ public static class ReagentCatalogue
             .. CsvTable.ReadEmbedded(
                 "carriers.csv", "id", "name", "epsilon_weak", "epsilon_strong", "transition_state", "polar_beta", "attenuation_gas",
                 "attenuation_liquid", "polar_scale", "hammett_rho", "hammett_scale", "steric", "ceiling", "isotope_effect",
-                "sigma_polar", "primary_sensitivity", "source", "locator")
+                "sigma_polar", "primary_sensitivity", "medium", "source", "locator")
                 .Rows.Select(static row => new Carrier
                 {
                     Id = row.Required("id"),
@@ -57,6 +57,7 @@ public static class ReagentCatalogue
                     UsesSigmaPlus = row.Required("hammett_scale") == "sigma+",
                     Steric = row.Number("steric", 0, 5),
                     PrimarySensitivity = row.Number("primary_sensitivity", 0.1, 10),
+                    ActsInStrongAcid = row.Required("medium") == "acid",
                     Ceiling = row.Number("ceiling", 0, 1e6),
                     IsotopeEffect = row.Number("isotope_effect", 1, 20),
                     PolarSigma = row.Number("sigma_polar", 0, 2),

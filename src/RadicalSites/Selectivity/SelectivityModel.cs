@@ -91,7 +91,7 @@ public sealed class SelectivityModel
             if (assignments[i].KilojoulesPerMole is null)
             {
                 Site site = analysis.Sites[i];
-                double value = rates.Rate(analysis.Molecule, site, RateModel.AnchorOf(site), 0).Value;
+                double value = rates.Rate(analysis.Molecule, site, rates.AnchorOf(site), 0).Value;
                 double weight = site.HydrogenCount * Math.Exp(value - largest);
                 bounds[i] = weight / (weight + sum);
             }

@@ -23,7 +23,10 @@ internal static class SelectivityParameters
     internal static PolarGroup Group(AlphaGroupKind kind) => Tables.Groups[(int)kind];
 
     /// <summary>Sigma-I of an aryl group.</summary>
-    internal static double ArylInductive => Tables.Aryl;
+    internal static double ArylInductive => Tables.Others.Aryl;
+
+    /// <summary>Constants of a protonated oxygen or carbonyl group.</summary>
+    internal static PolarGroup Oxonium => Tables.Others.Oxonium;
 
     /// <summary>Hammett constants of a group name, or null.</summary>
     internal static HammettConstants? Hammett(string group) => Tables.Hammett.GetValueOrDefault(group);
@@ -38,7 +41,7 @@ internal static class SelectivityParameters
     {
         internal static readonly FrozenDictionary<string, ClassRate[]> Rates = ReadRates();
         internal static readonly PolarGroup[] Groups = new PolarGroup[GroupCount];
-        internal static readonly double Aryl = ReadPolar();
+        internal static readonly (double Aryl, PolarGroup Oxonium) Others = ReadPolar();
 
         internal static readonly FrozenDictionary<string, HammettConstants> Hammett = CsvTable
             .ReadEmbedded("hammett.csv", "group", "meta", "para", "para_plus").Rows
@@ -77,27 +80,34 @@ internal static class SelectivityParameters
             return rates.ToFrozenDictionary();
         }
 
-        private static double ReadPolar()
+        private static (double Aryl, PolarGroup Oxonium) ReadPolar()
         {
             double aryl = 0;
+            PolarGroup oxonium = default;
             CsvTable table = CsvTable.ReadEmbedded(
                 "polar_groups.csv", "group", "sigma_inductive", "alpha_early", "alpha_late", "beta_early", "beta_late", "note");
             foreach (CsvRow row in table.Rows)
             {
-                double sigma = row.Number("sigma_inductive", -2, 2);
-                if (row.Required("group") == "Aryl")
+                var group = new PolarGroup(
+                    row.Number("sigma_inductive", -2, 2), row.Number("alpha_early", -20, 20), row.Number("alpha_late", -20, 20),
+                    row.Number("beta_early", -20, 20), row.Number("beta_late", -20, 20));
+                switch (row.Required("group"))
                 {
-                    aryl = sigma;
-                }
-                else if (row.Required("group") != "Vinyl")
-                {
-                    Groups[(int)row.Choice<AlphaGroupKind>("group")] = new PolarGroup(
-                        sigma, row.Number("alpha_early", -20, 20), row.Number("alpha_late", -20, 20),
-                        row.Number("beta_early", -20, 20), row.Number("beta_late", -20, 20));
+                    case "Aryl":
+                        aryl = group.SigmaInductive;
+                        break;
+                    case "Oxonium":
+                        oxonium = group;
+                        break;
+                    case "Vinyl":
+                        break;
+                    default:
+                        Groups[(int)row.Choice<AlphaGroupKind>("group")] = group;
+                        break;
                 }
             }
 
-            return aryl;
+            return (aryl, oxonium);
         }
     }
 }
