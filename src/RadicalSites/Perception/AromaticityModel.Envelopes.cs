@@ -31,7 +31,7 @@ internal static partial class AromaticityModel
                     if (IsAromaticBond(scratch, neighbors[i]) && IsAromaticBond(scratch, neighbors[j]))
                     {
                         int size = RingThrough(scratch, electrons, stamps, ++stamp, atom, neighbors[i].Atom, neighbors[j].Atom, ring);
-                        if (size >= 3 && !IsRepeat(ring[..size], atom) && Satisfies(electrons, ring[..size]))
+                        if (size >= 3 && Satisfies(electrons, ring[..size]) && !Holds(rings, ring[..size]))
                         {
                             rings.Add(ring[..size].ToArray());
                         }
@@ -97,7 +97,7 @@ internal static partial class AromaticityModel
             int[]? cycle = joined.Count <= LongestRing ? AsCycle(joined) : null;
             if (cycle is not null && Satisfies(electrons, cycle))
             {
-                MarkRing(scratch, cycle, []);
+                MarkRing(scratch, cycle, [], 0);
             }
 
             Extend(scratch, electrons, bonds, chosen, joined);

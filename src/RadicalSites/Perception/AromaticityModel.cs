@@ -22,6 +22,9 @@ internal static partial class AromaticityModel
     /// <summary>Longest ring or envelope that is tested.</summary>
     internal const int LongestRing = 24;
 
+    // Rings up to this size are taken whichever of several equal ones is met first.
+    private const int SmallRing = 8;
+
     private const int None = -1;
 
     /// <summary>Sets the aromatic bits of the scratch flags.</summary>
@@ -48,6 +51,7 @@ internal static partial class AromaticityModel
         stamps.Clear();
         done.Clear();
         int stamp = 0;
+        int found = 0;
         Span<int> ring = stackalloc int[LongestRing];
         for (int atom = 0; atom < count; atom++)
         {
@@ -68,18 +72,18 @@ internal static partial class AromaticityModel
                     }
 
                     int size = RingThrough(scratch, electrons, stamps, ++stamp, atom, neighbors[i].Atom, neighbors[j].Atom, ring);
-                    if (size < 3 || IsRepeat(ring[..size], atom))
+                    if (size < 3)
                     {
                         continue;
                     }
 
                     if (Satisfies(electrons, ring[..size]))
                     {
-                        MarkRing(scratch, ring[..size], done);
+                        MarkRing(scratch, ring[..size], done, ++found);
                     }
-                    else
+                    else if (!Holds(open ??= [], ring[..size]))
                     {
-                        (open ??= []).Add(ring[..size].ToArray());
+                        open.Add(ring[..size].ToArray());
                     }
                 }
             }
@@ -145,15 +149,21 @@ internal static partial class AromaticityModel
     private static bool IsPath(CompletionScratch scratch, ReadOnlySpan<int> electrons, Neighbor neighbor) =>
         electrons[neighbor.Atom] >= 0 && (scratch.BondFlags[neighbor.Bond] & CompletionScratch.RingBit) != 0;
 
-    // Each aromatic ring found writes its lowest atom + 1 on its bonds; two bonds with the same mark share that ring.
+    // Each aromatic ring found writes its number on its bonds; two bonds with the same number share that ring.
     private static bool SharesFoundRing(ReadOnlySpan<int> done, int left, int right) => done[left] != 0 && done[left] == done[right];
 
-    // A ring that does not satisfy the rule is seen from each of its angles; it is kept from its lowest atom only.
-    private static bool IsRepeat(ReadOnlySpan<int> ring, int atom)
+    // A ring that does not satisfy the rule is seen from each of its angles.
+    private static bool Holds(List<int[]> rings, ReadOnlySpan<int> ring)
     {
-        foreach (int member in ring)
+        foreach (int[] known in rings)
         {
-            if (member < atom)
+            bool same = known.Length == ring.Length;
+            for (int i = 0; same && i < ring.Length; i++)
+            {
+                same = known.AsSpan().Contains(ring[i]);
+            }
+
+            if (same)
             {
                 return true;
             }
@@ -173,14 +183,8 @@ internal static partial class AromaticityModel
         return sum % 4 == 2;
     }
 
-    private static void MarkRing(CompletionScratch scratch, ReadOnlySpan<int> ring, Span<int> done)
+    private static void MarkRing(CompletionScratch scratch, ReadOnlySpan<int> ring, Span<int> done, int number)
     {
-        int lowest = ring[0];
-        foreach (int atom in ring)
-        {
-            lowest = Math.Min(lowest, atom);
-        }
-
         for (int i = 0; i < ring.Length; i++)
         {
             int atom = ring[i];
@@ -193,7 +197,7 @@ internal static partial class AromaticityModel
                     scratch.BondFlags[neighbor.Bond] |= CompletionScratch.AromaticBit;
                     if (!done.IsEmpty)
                     {
-                        done[neighbor.Bond] = lowest + 1;
+                        done[neighbor.Bond] = number;
                     }
 
                     break;
@@ -266,7 +270,8 @@ internal static partial class AromaticityModel
         };
     }
 
-    // Smallest ring through the path left - atom - right, by breadth-first search between the two ends.
+    // Smallest ring through the path left - atom - right, by breadth-first search between the two ends. A macrocycle that
+    // is not the only one of its size (porphyrin) is left out: which one is found would depend on the atom order.
     private static int RingThrough(
         CompletionScratch scratch, ReadOnlySpan<int> electrons, Span<int> stamps, int stamp, int atom, int left,
         int right, Span<int> ring)
@@ -280,36 +285,57 @@ internal static partial class AromaticityModel
         parents[0] = -1;
         depths[0] = 2;
         int filled = 1;
-        for (int head = 0; head < filled && depths[head] < LongestRing; head++)
+        int last = -1;
+        bool several = false;
+        for (int head = 0; head < filled && depths[head] < LongestRing && (last < 0 || depths[head] == depths[last]); head++)
         {
             foreach (Neighbor neighbor in scratch.NeighborsOf(queue[head]))
             {
                 int other = neighbor.Atom;
-                if (stamps[other] == stamp || !IsPath(scratch, electrons, neighbor))
+                if (!IsPath(scratch, electrons, neighbor))
                 {
                     continue;
                 }
 
                 if (other == right)
                 {
-                    int size = depths[head] + 1;
-                    ring[0] = atom;
-                    ring[size - 1] = right;
-                    for (int at = head, i = size - 2; at >= 0; at = parents[at], i--)
-                    {
-                        ring[i] = queue[at];
-                    }
-
-                    return size;
+                    several |= last >= 0;
+                    last = last < 0 ? head : last;
                 }
-
-                stamps[other] = stamp;
-                queue[filled] = other;
-                parents[filled] = head;
-                depths[filled++] = depths[head] + 1;
+                else if (stamps[other] != stamp)
+                {
+                    stamps[other] = stamp;
+                    queue[filled] = other;
+                    parents[filled] = head;
+                    depths[filled++] = depths[head] + 1;
+                }
+                else if (depths[head] + 1 > SmallRing && other != atom)
+                {
+                    // Two ways of equal length to one atom.
+                    several |= IsNextLevel(queue[..filled], depths, other, depths[head] + 1);
+                }
             }
         }
 
-        return 0;
+        int size = last < 0 ? 0 : depths[last] + 1;
+        if (size == 0 || (several && size > SmallRing))
+        {
+            return 0;
+        }
+
+        ring[0] = atom;
+        ring[size - 1] = right;
+        for (int at = last, i = size - 2; at >= 0; at = parents[at], i--)
+        {
+            ring[i] = queue[at];
+        }
+
+        return size;
+    }
+
+    private static bool IsNextLevel(ReadOnlySpan<int> queue, ReadOnlySpan<int> depths, int atom, int depth)
+    {
+        int place = queue.LastIndexOf(atom);
+        return place >= 0 && depths[place] == depth;
     }
 }
