@@ -8,4 +8,6 @@ internal enum OutputFormat
     Ndjson,
     Csv,
     Smi,
+    Mol,
+    Sdf,
 }
