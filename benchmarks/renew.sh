@@ -1,14 +1,14 @@
 #!/usr/bin/env bash
 # Renews everything under benchmarks/results: peers.md, growth.md, cold-start.md, stages.md.
-# usage: renew.sh [--quick]      quick: fewer rounds and a short job of BenchmarkDotNet
+# usage: renew.sh [--quick]      quick: fewer rounds and records, short runs of BenchmarkDotNet in its own process
 set -euo pipefail
 cd "$(dirname "$0")"
 rounds=5
-job=Medium
+job=(--job Medium)
 records=1000000
 if [ "${1:-}" = --quick ]; then
   rounds=2
-  job=Dry
+  job=(--inProcess --warmupCount 1 --iterationCount 3 --iterationTime 100)
   records=100000
 fi
 
@@ -27,7 +27,7 @@ program=RadicalSites.Benchmarks/bin/Release/net10.0/RadicalSites.Benchmarks.dll
 { head_of "Cold start"; ./cold-start.sh; } >results/cold-start.md
 artifacts=$(mktemp -d)
 trap 'rm -rf "$artifacts"' EXIT
-dotnet $program --filter '*' --job $job --join --artifacts "$artifacts" >/dev/null
+dotnet $program --filter '*' "${job[@]}" --join --artifacts "$artifacts" >/dev/null
 {
   head_of "Stages"
   grep -h '^|' "$artifacts"/results/*github.md

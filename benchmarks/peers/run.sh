@@ -50,7 +50,7 @@ mkdir -p results
   echo "# Beside the peers"
   echo
   echo "One thread, $(wc -l <"$file") molecules of $(basename "$file") (NCI open database), best pass of $rounds alternating rounds"
-  echo "[microseconds per molecule]. The ratio is the peer's time by ours. Renew with \`benchmarks/peers/run.sh\`."
+  echo "[microseconds of processor time per molecule, so that other work on the machine counts little]. The ratio is the peer's time by ours. Renew with \`benchmarks/peers/run.sh\`."
   echo
   echo "Machine: $(lscpu | sed -n 's/^Model name: *//p' | head -1), $(nproc) cores, $(free -g | awk '/^Mem/{print $2}') GiB; .NET $(dotnet --version), $(java -version 2>&1 | head -1 | tr -d '\"')."
   echo "Versions: $(dpkg-query -W -f '${Package} ${Version}; ' librdkit1 libopenbabel7 libbeam-java libopenchemlib-java)"
