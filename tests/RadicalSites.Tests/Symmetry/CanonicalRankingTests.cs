@@ -102,7 +102,7 @@ public sealed class CanonicalRankingTests
     [InlineData("S[As@TB1](F)(Cl)(Br)N", "S[As@TB2](F)(Cl)(Br)N", false)]
     [InlineData("N[Co@OH1](N)(N)(Cl)(Cl)Cl", "Cl[Co@OH1](N)(N)(N)(Cl)Cl", false)] // mer and fac
     [InlineData("F[Co@OH1](Cl)(Br)(I)(N)O", "F[Co@OH2](Cl)(Br)(I)(N)O", false)]
-    [InlineData("C1CN[Co@OH5]23(N1)(NCCN2)NCCN3", "C1CN[Co@OH8]23(N1)(NCCN2)NCCN3", false)]
+    [InlineData("C1CN[Co@OH5]23(N1)(NCCN2)NCCN3", "C1CN[Co@OH15]23(N1)(NCCN2)NCCN3", false)]
     public void Write_coordination_bodies_are_respected(string one, string two, bool same)
     {
         Molecule first = SmilesReader.Parse(one);
