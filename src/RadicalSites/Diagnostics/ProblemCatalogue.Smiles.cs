@@ -90,10 +90,16 @@ public static partial class ProblemCatalogue
             "smiles-white-space", "White space in the SMILES", "White space ends a SMILES; text follows it.",
             "A name belongs to the line format, not to the SMILES.", "Pass the part before the white space.");
 
+        /// <summary>Remark: a directional bond beside a double bond whose other end has none.</summary>
+        public static readonly ProblemDescriptor DirectionIncomplete = new(
+            "smiles-direction-incomplete", Severity.Info, "Incomplete / or \\", "The mark / or \\ at the double bond of atom {0} has no partner at the other end.",
+            "Both ends of a double bond need a mark to fix its geometry.", "Add the second mark, or remove this one.");
+
         internal static IReadOnlyList<ProblemDescriptor> Entries =>
         [
             Empty, UnexpectedCharacter, UnknownElement, Bracket, RingUnclosed, RingMismatch, RingSelf, RingNumber,
             BranchUnclosed, BranchUnopened, BranchEmpty, BondDangling, DirectionConflict, StereoNeighbors, TooLong, Trailing,
+            DirectionIncomplete,
         ];
 
         private static ProblemDescriptor Error(string code, string title, string message, string cause, string remedy) =>

@@ -6,6 +6,9 @@ namespace RadicalSites.Perception;
 /// <summary>Turns plain hydrogens that are written as atoms into counts of their neighbour.</summary>
 internal static class HydrogenFolding
 {
+    // Above any known coordination number; keeps the counts far from the limit of their type.
+    private const int MostPartners = 20;
+
     /// <summary>Folds and compacts the draft.</summary>
     /// <param name="draft">The draft, changed in place.</param>
     /// <returns>Input index of each remaining atom, or null when nothing was folded.</returns>
@@ -66,7 +69,7 @@ internal static class HydrogenFolding
         return atom is { Element: 1, Charge: 0, Isotope: 0, AtomClass: 0, Hydrogens: <= 0, Unpaired: 0 }
             && degree[index] == 1
             && draft.Atoms[partner[index]].Element > 1
-            && draft.Atoms[partner[index]].Hydrogens < 100;
+            && degree[partner[index]] <= MostPartners;
     }
 
     private static void Compact(StructureDraft draft, ReadOnlySpan<int> newIndex, Span<int> inputIndices)

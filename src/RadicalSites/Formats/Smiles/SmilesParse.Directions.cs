@@ -61,6 +61,11 @@ internal sealed partial class SmilesParse
                 doubles++;
             }
 
+            if (doubles % 2 == 1 && remarks is not null && upper[end] < 0 && lower[end] < 0)
+            {
+                Remark(Entry.DirectionIncomplete, draft.Atoms[atom].Position, atom);
+            }
+
             if (end > atom && doubles % 2 == 1 && (upper[end] >= 0 || lower[end] >= 0))
             {
                 bool beginUp = upper[atom] >= 0;
@@ -97,7 +102,7 @@ internal sealed partial class SmilesParse
         {
             // At a carbonyl both neighbours may carry marks that belong to the double bonds beyond them.
             ends ??= CountEnds();
-            return ends[partner[atom]] == 1 || Fail(Entry.DirectionConflict, position);
+            return ends[partner[atom]] == 1 || Overlook(Entry.DirectionConflict, position);
         }
 
         side[atom] = carrier;

@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using RadicalSites.Molecules;
 using Entry = RadicalSites.Diagnostics.ProblemCatalogue.Smiles;
 
@@ -21,15 +22,19 @@ internal sealed partial class SmilesParse
 
         char symbol = bondSymbol;
         bondSymbol = '\0';
-        for (int i = openingCount - 1; i >= 0; i--)
+        if (number < openingOfNumber.Length && openingOfNumber[number] > 0)
         {
-            if (openings[i].Number == number)
+            int place = openingOfNumber[number] - 1;
+            RingOpening opening = openings[place];
+            openingOfNumber[number] = 0;
+            openingCount--;
+            if (place < openingCount)
             {
-                RingOpening opening = openings[i];
-                Array.Copy(openings, i + 1, openings, i, openingCount - i - 1);
-                openingCount--;
-                return CloseRing(opening, symbol, position);
+                openings[place] = openings[openingCount];
+                openingOfNumber[openings[place].Number] = place + 1;
             }
+
+            return CloseRing(opening, symbol, position);
         }
 
         if (openingCount == openings.Length)
@@ -37,6 +42,12 @@ internal sealed partial class SmilesParse
             Array.Resize(ref openings, 2 * openingCount);
         }
 
+        if (number >= openingOfNumber.Length)
+        {
+            Array.Resize(ref openingOfNumber, Math.Max(number + 1, Math.Min(2 * openingOfNumber.Length, 1_000_000)));
+        }
+
+        openingOfNumber[number] = openingCount + 1;
         openings[openingCount++] = new RingOpening
         {
             Number = number,
@@ -106,6 +117,12 @@ internal sealed partial class SmilesParse
         bool bothAromatic = draft.Atoms[begin].IsAromatic && draft.Atoms[end].IsAromatic;
         AddBond(begin, end, joined, bothAromatic, position);
         LeaveOpenBesideWildcard(begin, end, joined);
+        if (ringCount == ringEnds.Length)
+        {
+            Array.Resize(ref ringEnds, 2 * ringCount);
+        }
+
+        ringEnds[ringCount++] = new RingEnds(draft.BondCount - 1, opening.Number, opening.Position, position);
         if (markCount > 0)
         {
             if (opening.Carrier >= 0)
@@ -127,10 +144,12 @@ internal sealed partial class SmilesParse
         _ => first == second,
     };
 
-    // Only the last bonds can join these atoms if the ring is short; a long list is scanned from its end.
+    // Bonds are stored in the order of their later atom, so bonds of this atom stand at the end. Of an atom with very many
+    // ring bonds only the last are looked at here; the rest is settled once, after the scan.
     private bool HasBond(int begin, int end)
     {
-        for (int i = draft.BondCount - 1; i >= 0; i--)
+        int limit = Math.Max(0, draft.BondCount - 32);
+        for (int i = draft.BondCount - 1; i >= limit; i--)
         {
             ref BuilderBond bond = ref draft.Bonds[i];
             if ((bond.Begin == begin && bond.End == end) || (bond.Begin == end && bond.End == begin))
@@ -138,13 +157,54 @@ internal sealed partial class SmilesParse
                 return true;
             }
 
-            // Bonds are stored in the order of their later atom; before it no bond of that atom can stand.
             if (bond.Begin < end && bond.End < end)
             {
-                break;
+                return false;
             }
         }
 
+        mayRepeatBond |= limit > 0;
         return false;
+    }
+
+    private bool RingBondsDiffer()
+    {
+        var seen = new HashSet<long>();
+        int ring = 0;
+        for (int i = 0; i < draft.BondCount; i++)
+        {
+            ref BuilderBond bond = ref draft.Bonds[i];
+            bool closesRing = ring < ringCount && ringEnds[ring].Bond == i;
+            long pair = ((long)Math.Min(bond.Begin, bond.End) << 32) | (uint)Math.Max(bond.Begin, bond.End);
+            if (!seen.Add(pair) && closesRing)
+            {
+                return Fail(Entry.RingSelf, ringEnds[ring].Closing, ringEnds[ring].Opening, [ringEnds[ring].Number]);
+            }
+
+            ring += closesRing ? 1 : 0;
+        }
+
+        return true;
+    }
+
+    private void ForgetOpenings()
+    {
+        for (int i = 0; i < openingCount; i++)
+        {
+            openingOfNumber[openings[i].Number] = 0;
+        }
+
+        openingCount = 0;
+    }
+
+    private bool FailUnclosed()
+    {
+        int first = 0;
+        for (int i = 1; i < openingCount; i++)
+        {
+            first = openings[i].Position < openings[first].Position ? i : first;
+        }
+
+        return Fail(Entry.RingUnclosed, openings[first].Position, openings[first].Number);
     }
 }

@@ -14,7 +14,7 @@ internal sealed partial class SmilesParse
         }
 
         ref StereoMark mark = ref marks[markCount++];
-        mark = new StereoMark { Atom = atom, Kind = kind, Configuration = configuration };
+        mark = new StereoMark { Atom = atom, Kind = kind, Configuration = configuration, HasPrevious = previous >= 0 };
         if (previous >= 0)
         {
             mark.Carriers[mark.Count++] = previous;
@@ -26,41 +26,59 @@ internal sealed partial class SmilesParse
         }
     }
 
-    // Marks are few and atoms ascend, so the newest marks are looked at first.
     private int AppendCarrier(int atom, int carrier)
     {
-        for (int i = markCount - 1; i >= 0; i--)
+        int found = MarkOf(atom);
+        if (found < 0)
         {
-            if (marks[i].Atom == atom)
-            {
-                ref StereoMark mark = ref marks[i];
-                if (mark.Count < 8)
-                {
-                    mark.Carriers[mark.Count] = carrier;
-                }
-
-                return mark.Count++;
-            }
-
-            if (marks[i].Atom < atom)
-            {
-                break;
-            }
+            return -1;
         }
 
-        return -1;
+        ref StereoMark mark = ref marks[found];
+        if (mark.Count < 8)
+        {
+            mark.Carriers[mark.Count] = carrier;
+        }
+
+        return mark.Count++;
     }
 
     private void SetCarrier(int atom, int place, int carrier)
     {
-        for (int i = markCount - 1; i >= 0; i--)
+        int found = place < 8 ? MarkOf(atom) : -1;
+        if (found >= 0)
         {
-            if (marks[i].Atom == atom && place < 8)
-            {
-                marks[i].Carriers[place] = carrier;
-                return;
-            }
+            marks[found].Carriers[place] = carrier;
         }
+    }
+
+    // Marks stand in the order of their atoms; most often the newest one is meant.
+    private int MarkOf(int atom)
+    {
+        int low = 0;
+        int high = markCount - 1;
+        int middle = high;
+        while (low <= high)
+        {
+            int difference = marks[middle].Atom - atom;
+            if (difference == 0)
+            {
+                return middle;
+            }
+
+            if (difference < 0)
+            {
+                low = middle + 1;
+            }
+            else
+            {
+                high = middle - 1;
+            }
+
+            middle = (low + high) >>> 1;
+        }
+
+        return -1;
     }
 
     private bool CompleteStereo()
@@ -109,7 +127,7 @@ internal sealed partial class SmilesParse
         if (mark.Count == expected - 1 && mark.Count >= 3 && MayHaveLonePair(draft.Atoms[atom]))
         {
             // A lone pair takes the place of an implicit hydrogen: right after the atom before the centre.
-            int place = mark.Carriers[0] >= 0 && mark.Carriers[0] < atom && HasBond(atom, mark.Carriers[0], atom) ? 1 : 0;
+            int place = mark.HasPrevious ? 1 : 0;
             for (int i = mark.Count; i > place; i--)
             {
                 mark.Carriers[i] = mark.Carriers[i - 1];
@@ -121,7 +139,7 @@ internal sealed partial class SmilesParse
 
         if (mark.Count != expected)
         {
-            return lenient || Fail(
+            return Overlook(
                 Entry.StereoNeighbors, draft.Atoms[atom].Position, atom, mark.Count,
                 mark.Configuration == 1 ? "@" : mark.Kind == StereoKind.Tetrahedral ? "@@" : mark.Kind.ToString());
         }
@@ -146,27 +164,12 @@ internal sealed partial class SmilesParse
     private static bool MayHaveLonePair(in BuilderAtom atom) =>
         atom.Element is 7 or 15 or 16 or 33 or 34 or 51 or 52 || atom.Charge < 0 || atom.Element > 18;
 
-    private bool HasBond(int begin, int end, int before)
-    {
-        for (int i = draft.BondCount - 1; i >= 0; i--)
-        {
-            ref BuilderBond bond = ref draft.Bonds[i];
-            if (bond.Begin == end && bond.End == begin)
-            {
-                return bond.End == before;
-            }
-        }
-
-        return false;
-    }
-
     private bool IsAllene(int atom)
     {
         int doubles = 0;
-        for (int i = 0; i < draft.BondCount; i++)
+        foreach (int bond in BondsOf(atom))
         {
-            ref BuilderBond bond = ref draft.Bonds[i];
-            doubles += (bond.Begin == atom || bond.End == atom) && bond.Order == BondOrder.Double ? 1 : 0;
+            doubles += draft.Bonds[bond].Order == BondOrder.Double ? 1 : 0;
         }
 
         return doubles == 2;
@@ -192,7 +195,7 @@ internal sealed partial class SmilesParse
 
         if (filled != 4)
         {
-            return lenient || Fail(Entry.StereoNeighbors, draft.Atoms[mark.Atom].Position, mark.Atom, filled, "@AL");
+            return Overlook(Entry.StereoNeighbors, draft.Atoms[mark.Atom].Position, mark.Atom, filled, "@AL");
         }
 
         draft.AddStereo(new StereoElement(StereoKind.Allene, mark.Atom, mark.Atom, carriers.ToArray(), mark.Configuration));
@@ -201,11 +204,10 @@ internal sealed partial class SmilesParse
 
     private int NextInCumulene(int atom, int from)
     {
-        for (int i = 0; i < draft.BondCount; i++)
+        foreach (int bond in BondsOf(atom))
         {
-            ref BuilderBond bond = ref draft.Bonds[i];
-            int other = bond.Begin == atom ? bond.End : bond.End == atom ? bond.Begin : -1;
-            if (other >= 0 && other != from && bond.Order == BondOrder.Double)
+            int other = draft.Bonds[bond].Begin ^ draft.Bonds[bond].End ^ atom;
+            if (other != from && draft.Bonds[bond].Order == BondOrder.Double)
             {
                 return other;
             }
@@ -214,37 +216,68 @@ internal sealed partial class SmilesParse
         return -1;
     }
 
+    // Reading order at an end: the atom before it, its hydrogen, its ring digits, then what follows.
     private int AppendEnds(int atom, int from, Span<int> carriers, int filled)
     {
         int before = filled;
-        ref BuilderAtom data = ref draft.Atoms[atom];
-
-        // Reading order at a bracket or organic atom: the atom before it, its hydrogen, then what follows.
-        int start = filled;
-        for (int i = 0; i < draft.BondCount && filled < 4; i++)
+        long lastKey = 0;
+        bool hasPrevious = false;
+        foreach (int bond in BondsOf(atom))
         {
-            ref BuilderBond bond = ref draft.Bonds[i];
-            int other = bond.Begin == atom ? bond.End : bond.End == atom ? bond.Begin : -1;
-            if (other >= 0 && other != from)
+            int other = draft.Bonds[bond].Begin ^ draft.Bonds[bond].End ^ atom;
+            if (other == from || filled == 4)
+            {
+                continue;
+            }
+
+            long key = ReadingOrder(bond, atom, other);
+            hasPrevious |= key == 0;
+            if (filled - before == 1 && key < lastKey)
+            {
+                carriers[filled++] = carriers[before];
+                carriers[before] = other;
+            }
+            else
             {
                 carriers[filled++] = other;
+                lastKey = key;
             }
         }
 
         if (filled - before == 1 && filled < 4)
         {
-            bool substituentFirst = carriers[start] < atom;
-            if (substituentFirst)
-            {
-                carriers[filled++] = -1;
-            }
-            else
-            {
-                carriers[filled++] = carriers[start];
-                carriers[start] = -1;
-            }
+            int place = hasPrevious ? before + 1 : before;
+            carriers[filled++] = carriers[before];
+            carriers[place] = -1;
         }
 
         return filled;
+    }
+
+    // 0 for the atom before; then ring digits by their place in the text; then atoms that follow.
+    private long ReadingOrder(int bond, int atom, int other)
+    {
+        int low = 0;
+        int high = ringCount - 1;
+        while (low <= high)
+        {
+            int middle = (low + high) / 2;
+            ref RingEnds ends = ref ringEnds[middle];
+            if (ends.Bond == bond)
+            {
+                return 1 + (draft.Bonds[bond].Begin == atom ? ends.Opening : ends.Closing);
+            }
+
+            if (ends.Bond < bond)
+            {
+                low = middle + 1;
+            }
+            else
+            {
+                high = middle - 1;
+            }
+        }
+
+        return other < atom ? 0 : int.MaxValue + (long)other;
     }
 }

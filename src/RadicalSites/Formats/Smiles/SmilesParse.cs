@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
 using RadicalSites.Perception;
@@ -14,30 +15,43 @@ internal sealed partial class SmilesParse
     private int[] branchPositions = new int[32];
     private RingOpening[] openings = new RingOpening[16];
     private int openingCount;
+    private int[] openingOfNumber = new int[100];
+    private RingEnds[] ringEnds = new RingEnds[16];
+    private int ringCount;
+    private bool mayRepeatBond;
+    private bool lenient;
+    private List<FormatProblem>? remarks;
     private StereoMark[] marks = new StereoMark[8];
     private int markCount;
     private DirectionMark[] directions = new DirectionMark[8];
     private int directionCount;
     private FormatProblem? failure;
-    private bool lenient;
 
     private int previous;
     private char bondSymbol;
     private int bondPosition;
 
-    internal Molecule? Read(ReadOnlySpan<char> text, SmilesReaderOptions options, out FormatProblem? problem)
+    internal Molecule? Read(ReadOnlySpan<char> text, SmilesReaderOptions options, List<FormatProblem>? found, out FormatProblem? problem)
     {
         draft.Clear();
         lenient = options.IsLenient;
+        remarks = found;
         draft.AcceptsAnyValence = lenient;
         if (lenient)
         {
             text = text.Trim();
             int end = text.IndexOfAny(' ', '\t');
-            text = end < 0 ? text : text[..end];
+            if (end >= 0)
+            {
+                Remark(Entry.Trailing, end);
+                text = text[..end];
+            }
         }
 
-        openingCount = 0;
+        ForgetOpenings();
+        ringCount = 0;
+        mayRepeatBond = false;
+        incidenceReady = false;
         markCount = 0;
         directionCount = 0;
         failure = null;
@@ -219,10 +233,10 @@ internal sealed partial class SmilesParse
 
         if (openingCount > 0)
         {
-            return Fail(Entry.RingUnclosed, openings[0].Position, openings[0].Number);
+            return FailUnclosed();
         }
 
-        return true;
+        return !mayRepeatBond || RingBondsDiffer();
     }
 
     private void Organic(int element, bool aromatic, int position)
@@ -313,21 +327,6 @@ internal sealed partial class SmilesParse
         directions[directionCount++] = new DirectionMark(bond, up);
     }
 
-    private bool Fail(ProblemDescriptor problem, int position, params object[] arguments) =>
-        Fail(problem, position, -1, arguments);
-
-    private bool Fail(ProblemDescriptor problem, int position, int second, object[] arguments)
-    {
-        failure = new FormatProblem
-        {
-            Descriptor = problem,
-            Message = problem.Format(arguments),
-            Position = position,
-            SecondPosition = second,
-        };
-        return false;
-    }
-
     private struct RingOpening
     {
         internal int Number;
@@ -349,7 +348,13 @@ internal sealed partial class SmilesParse
         internal int Configuration;
         internal int Count;
         internal Carriers Carriers;
+
+        /// <summary>Whether the first carrier is the atom before the centre.</summary>
+        internal bool HasPrevious;
     }
+
+    /// <summary>Where the text opens and closes a ring bond.</summary>
+    private readonly record struct RingEnds(int Bond, int Number, int Opening, int Closing);
 
     [System.Runtime.CompilerServices.InlineArray(8)]
     private struct Carriers

@@ -1,4 +1,5 @@
 using System;
+using System.Collections.Generic;
 using System.Diagnostics.CodeAnalysis;
 using RadicalSites.Diagnostics;
 using RadicalSites.Molecules;
@@ -54,7 +55,7 @@ public static class SmilesReader
     {
         ArgumentNullException.ThrowIfNull(options);
         SmilesParse parse = parseOfThread ??= new SmilesParse();
-        molecule = parse.Read(text, options, out problem);
+        molecule = parse.Read(text, options, null, out problem);
         if (molecule is not null)
         {
             problem = null;
@@ -63,5 +64,29 @@ public static class SmilesReader
 
         problem = problem! with { Input = text.ToString() };
         return false;
+    }
+
+    /// <summary>Reads a molecule without throwing, and tells what was noticed on the way.</summary>
+    /// <param name="text">SMILES.</param>
+    /// <param name="options">How strictly to read.</param>
+    /// <param name="molecule">The molecule on success.</param>
+    /// <param name="problem">What is wrong otherwise.</param>
+    /// <param name="remarks">
+    /// Stereo marks and text that lenient reading left out, and marks / and \ that fix nothing because the other end of the
+    /// double bond has none; may be empty.
+    /// </param>
+    /// <returns>Whether the text is a molecule.</returns>
+    public static bool TryParse(
+        ReadOnlySpan<char> text, SmilesReaderOptions options, [NotNullWhen(true)] out Molecule? molecule,
+        [NotNullWhen(false)] out FormatProblem? problem, out IReadOnlyList<FormatProblem> remarks)
+    {
+        ArgumentNullException.ThrowIfNull(options);
+        var found = new List<FormatProblem>();
+        SmilesParse parse = parseOfThread ??= new SmilesParse();
+        molecule = parse.Read(text, options, found, out problem);
+        string input = found.Count > 0 || molecule is null ? text.ToString() : "";
+        remarks = found.ConvertAll(remark => remark with { Input = input });
+        problem = molecule is null ? problem! with { Input = input } : null;
+        return molecule is not null;
     }
 }
