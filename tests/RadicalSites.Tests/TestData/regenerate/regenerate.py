@@ -1,7 +1,7 @@
 #!/usr/bin/python3
 """Makes the files of TestData/Reference again, with reference toolkits from Debian.
 
-usage: regenerate.py [nci] [named] [stereo] [strings] [topicity] [layout] [polychlorination]
+usage: regenerate.py [nci] [named] [stereo] [strings] [polychlorination]
 Without arguments everything is made. Needs root or sudo once, to install the toolkits by package name.
 """
 import shutil
@@ -45,7 +45,7 @@ def main():
     install()
     sys.path.insert(0, str(HERE))
     import importlib
-    wanted = sys.argv[1:] or ["nci", "named", "stereo", "strings", "topicity", "layout", "polychlorination"]
+    wanted = sys.argv[1:] or ["nci", "named", "stereo", "strings", "polychlorination"]
     for name in wanted:
         importlib.import_module("make_" + name).make(write)
 
