@@ -45,9 +45,36 @@ internal static class MoleculeCompletion
         if (rings)
         {
             AromaticityModel.Perceive(draft, scratch);
+            DropAromaticCisTrans(draft, scratch);
         }
 
         return Build(draft, scratch, inputIndices);
+    }
+
+    // The double bonds of an aromatic ring are not localised, so marks as in C1=N/C=C\C=C1 fix nothing and are not kept.
+    private static void DropAromaticCisTrans(StructureDraft draft, CompletionScratch scratch)
+    {
+        int kept = 0;
+        for (int i = 0; i < draft.StereoCount; i++)
+        {
+            StereoElement element = draft.Stereo[i];
+            bool isAromatic = false;
+            if (element.Kind == StereoKind.CisTrans)
+            {
+                foreach (Neighbor neighbor in scratch.NeighborsOf(element.Focus))
+                {
+                    isAromatic |= neighbor.Atom == element.FocusEnd
+                        && (scratch.BondFlags[neighbor.Bond] & CompletionScratch.AromaticBit) != 0;
+                }
+            }
+
+            if (!isAromatic)
+            {
+                draft.Stereo[kept++] = element;
+            }
+        }
+
+        draft.StereoCount = kept;
     }
 
     private static Molecule Build(StructureDraft draft, CompletionScratch scratch, int[]? inputIndices)
