@@ -45,36 +45,79 @@ internal static class MoleculeCompletion
         if (rings)
         {
             AromaticityModel.Perceive(draft, scratch);
-            DropAromaticCisTrans(draft, scratch);
+            DropMeaninglessCisTrans(draft, scratch);
         }
 
         return Build(draft, scratch, inputIndices);
     }
 
-    // The double bonds of an aromatic ring are not localised, so marks as in C1=N/C=C\C=C1 fix nothing and are not kept.
-    private static void DropAromaticCisTrans(StructureDraft draft, CompletionScratch scratch)
+    // Marks on ring bonds fix nothing, and are not kept, where the double bond is aromatic (C1=N/C=C\C=C1) or where its ring
+    // is too small to hold it in another way than cis.
+    private static void DropMeaninglessCisTrans(StructureDraft draft, CompletionScratch scratch)
     {
         int kept = 0;
         for (int i = 0; i < draft.StereoCount; i++)
         {
             StereoElement element = draft.Stereo[i];
-            bool isAromatic = false;
+            bool isMeaningless = false;
             if (element.Kind == StereoKind.CisTrans)
             {
                 foreach (Neighbor neighbor in scratch.NeighborsOf(element.Focus))
                 {
-                    isAromatic |= neighbor.Atom == element.FocusEnd
-                        && (scratch.BondFlags[neighbor.Bond] & CompletionScratch.AromaticBit) != 0;
+                    isMeaningless |= neighbor.Atom == element.FocusEnd
+                        && ((scratch.BondFlags[neighbor.Bond] & CompletionScratch.AromaticBit) != 0
+                            || IsInSmallRing(scratch, draft.AtomCount, element.Focus, neighbor));
                 }
             }
 
-            if (!isAromatic)
+            if (!isMeaningless)
             {
                 draft.Stereo[kept++] = element;
             }
         }
 
         draft.StereoCount = kept;
+    }
+
+    // Breadth-first from one end to the other without the bond between them, at most six bonds and two hundred atoms far.
+    private static bool IsInSmallRing(CompletionScratch scratch, int atomCount, int begin, Neighbor end)
+    {
+        if ((scratch.BondFlags[end.Bond] & CompletionScratch.RingBit) == 0)
+        {
+            return false;
+        }
+
+        const int LargestSmallRing = 7;
+        const int MostAtoms = 200;
+        Span<int> queue = stackalloc int[MostAtoms];
+        Span<int> depths = stackalloc int[MostAtoms];
+        int most = Math.Min(MostAtoms, atomCount);
+        queue[0] = begin;
+        depths[0] = 1;
+        int filled = 1;
+        for (int head = 0; head < filled && depths[head] < LargestSmallRing; head++)
+        {
+            foreach (Neighbor neighbor in scratch.NeighborsOf(queue[head]))
+            {
+                if (neighbor.Bond == end.Bond)
+                {
+                    continue;
+                }
+
+                if (neighbor.Atom == end.Atom)
+                {
+                    return true;
+                }
+
+                if (filled < most && !queue[..filled].Contains(neighbor.Atom))
+                {
+                    queue[filled] = neighbor.Atom;
+                    depths[filled++] = depths[head] + 1;
+                }
+            }
+        }
+
+        return false;
     }
 
     private static Molecule Build(StructureDraft draft, CompletionScratch scratch, int[]? inputIndices)
