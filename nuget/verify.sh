@@ -54,7 +54,7 @@ diff "$work/expected.txt" "$work/got.txt" || fail "the example of the package re
 echo "-- the tool from the feed"
 (cd "$work/consumer" && dotnet tool install RadicalSites.Cli --version "$version" --tool-path "$work/tool" >/dev/null) || fail "the tool does not install"
 "$work/tool/radicalsites" predict CCC --reagent Cl2 --format csv >"$work/tool.txt"
-grep -q '^1,,CCC,ok,Cl2,298.15,1,0;2,6,primary' "$work/tool.txt" || fail "the tool prints something else: $(cat "$work/tool.txt")"
+grep -q '^1,,CCC,ok,CCC,Cl2,298.15,,1,0;2,6,primary' "$work/tool.txt" || fail "the tool prints something else: $(cat "$work/tool.txt")"
 "$work/tool/radicalsites" --version
 
 if [ "${RADICALSITES_SKIP_AOT:-0}" = 1 ]; then
