@@ -65,6 +65,8 @@ else
     cat >"$work/consumer/nuget.config" <<X
 <configuration>
   <packageSources><add key="local" value="$feed" /></packageSources>
+  <fallbackPackageFolders><add key="usual" value="${NUGET_PACKAGES:-$HOME/.nuget/packages}" /></fallbackPackageFolders>
+  <config><add key="globalPackagesFolder" value="$work/packages" /></config>
 </configuration>
 X
     for mode in PublishAot PublishTrimmed; do
