@@ -13,6 +13,20 @@ internal static partial class AromaticityModel
     private static void JoinRings(
         CompletionScratch scratch, ReadOnlySpan<int> electrons, Span<int> stamps, int stamp, List<int[]> open, int count)
     {
+        // A ring all of whose bonds are aromatic already (the rim of fused aromatic rings) can add nothing.
+        for (int i = open.Count - 1; i >= 0; i--)
+        {
+            if (IsWhollyAromatic(scratch, open[i]))
+            {
+                open.RemoveAt(i);
+            }
+        }
+
+        if (open.Count == 0)
+        {
+            return;
+        }
+
         // Rings that are aromatic already may be part of an envelope with those that are not.
         var rings = new List<int[]>(open);
         Span<int> ring = stackalloc int[LongestRing];
@@ -58,6 +72,23 @@ internal static partial class AromaticityModel
             chosen.Add(first);
             Extend(scratch, electrons, bonds, chosen, new HashSet<(int, int)>(bonds[first]));
         }
+    }
+
+    private static bool IsWhollyAromatic(CompletionScratch scratch, int[] ring)
+    {
+        for (int i = 0; i < ring.Length; i++)
+        {
+            int next = ring[i + 1 == ring.Length ? 0 : i + 1];
+            foreach (Neighbor neighbor in scratch.NeighborsOf(ring[i]))
+            {
+                if (neighbor.Atom == next && !IsAromaticBond(scratch, neighbor))
+                {
+                    return false;
+                }
+            }
+        }
+
+        return true;
     }
 
     private static bool IsAromaticBond(CompletionScratch scratch, Neighbor neighbor) =>
