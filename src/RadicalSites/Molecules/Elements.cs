@@ -36,12 +36,16 @@ public static class Elements
     /// <returns>Atomic number 1 to 118, 0 for <c>*</c>, or -1 when there is no such element.</returns>
     public static int Find(ReadOnlySpan<char> symbol)
     {
-        for (int i = 0; i < Symbols.Length; i++)
+        if (symbol is "*")
         {
-            if (symbol.SequenceEqual(Symbols[i]))
-            {
-                return i;
-            }
+            return 0;
+        }
+
+        if (symbol.Length is 1 or 2 && char.IsAsciiLetterUpper(symbol[0])
+            && (symbol.Length == 1 || char.IsAsciiLetterLower(symbol[1]))
+            && ElementSymbols.Find(symbol[0], symbol.Length == 1 ? '\0' : symbol[1]) is > 0 and int element)
+        {
+            return element;
         }
 
         return -1;

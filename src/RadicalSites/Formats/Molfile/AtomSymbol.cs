@@ -6,8 +6,6 @@ namespace RadicalSites.Formats.Molfile;
 /// <summary>Atom symbols of connection tables: elements, D and T, and the symbols that stand for sets of atoms.</summary>
 internal static class AtomSymbol
 {
-    private static readonly byte[] Table = Build();
-
     private static readonly string[] Generic =
         ["A", "Q", "*", "X", "M", "AH", "QH", "XH", "MH", "R", "R#", "LP", "L", "Du", "Pol", "Mod", "Any", "Hal", "G", "Z"];
 
@@ -23,13 +21,13 @@ internal static class AtomSymbol
             return 0;
         }
 
-        if (symbol.Length == 1 && symbol[0] is 'D' or 'T')
+        if (symbol.Length == 1 && symbol[0] is ('D' or 'T'))
         {
             isotope = symbol[0] == 'D' ? 2 : 3;
-            return symbol.Length == 1 ? 1 : Lookup(symbol, ref isotope);
+            return 1;
         }
 
-        return Lookup(symbol, ref isotope);
+        return ElementSymbols.Find(symbol[0], symbol.Length == 1 ? '\0' : symbol[1]);
     }
 
     /// <summary>Whether a symbol is defined for queries or generic structures.</summary>
@@ -44,27 +42,5 @@ internal static class AtomSymbol
         }
 
         return symbol.Length > 1 && symbol[0] == 'R' && symbol[1..].IndexOfAnyExceptInRange('0', '9') < 0;
-    }
-
-    private static int Lookup(ReadOnlySpan<char> symbol, ref int isotope)
-    {
-        if (symbol.Length == 2)
-        {
-            isotope = 0;
-        }
-
-        return Table[((symbol[0] - 'A') * 27) + (symbol.Length == 1 ? 0 : symbol[1] - 'a' + 1)];
-    }
-
-    private static byte[] Build()
-    {
-        var table = new byte[26 * 27];
-        for (int element = 1; element <= Elements.Last; element++)
-        {
-            string symbol = Elements.SymbolOf(element);
-            table[((symbol[0] - 'A') * 27) + (symbol.Length == 1 ? 0 : symbol[1] - 'a' + 1)] = (byte)element;
-        }
-
-        return table;
     }
 }

@@ -1,6 +1,4 @@
-using RadicalSites.Molecules;
-
-namespace RadicalSites.Formats.Smiles;
+namespace RadicalSites.Molecules;
 
 /// <summary>Element symbols by their letters, looked up without a search.</summary>
 internal static class ElementSymbols
